@@ -1,0 +1,18 @@
+# Writes OUTPUT, a C++ source that holds the text of each file in FILES (a list) under its name.
+set(text "// Made by src/embed_files.cmake; do not edit.\n#include \"spanledger/input/builtin_files.hpp\"\n\n#include <array>\n\n")
+string(APPEND text "namespace spanledger {\nnamespace {\n")
+set(entries "")
+set(index 0)
+foreach(file IN LISTS FILES)
+    get_filename_component(name ${file} NAME)
+    # Hexadecimal keeps every byte as it is, whatever CMake or the compiler would make of quotes and semicolons.
+    file(READ ${file} hex HEX)
+    string(REGEX REPLACE "([0-9a-f][0-9a-f])" "'\\\\x\\1'," bytes "${hex}")
+    string(REPLACE "'\\x0a'," "'\\x0a',\n" bytes "${bytes}")
+    string(APPEND text "constexpr char file_${index}[] = {${bytes}'\\0'};\n")
+    string(APPEND entries "    BuiltinFile{\"${name}\", {file_${index}, sizeof file_${index} - 1}},\n")
+    math(EXPR index "${index} + 1")
+endforeach()
+string(APPEND text "constexpr std::array files{\n${entries}};\n\n} // namespace\n\n")
+string(APPEND text "std::span<const BuiltinFile> builtin_files() noexcept { return files; }\n\n} // namespace spanledger\n")
+file(WRITE ${OUTPUT} "${text}")
