@@ -3,6 +3,7 @@
 
 #include "spanledger/engine/basis_statement.hpp"
 #include "spanledger/engine/cell_solver.hpp"
+#include "spanledger/engine/limit_curves.hpp"
 #include "spanledger/engine/permissible_load.hpp"
 #include "spanledger/fingerprint.hpp"
 #include "spanledger/member.hpp"
@@ -190,6 +191,7 @@ Issue issue_tables(const Inputs& inputs, const Progress& progress) {
             issue.tables.push_back(sweep_table(inputs, request, entry, members, counter));
         }
     }
+    issue.curves = limit_curves_of_brief(inputs);
     issue.basis = basis_lines(inputs);
     issue.sources = source_lines(inputs);
     issue.cautions = cautions(inputs);

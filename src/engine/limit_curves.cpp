@@ -11,50 +11,55 @@
 namespace spanledger {
 namespace {
 
-constexpr std::size_t points = 28;
-
-/// The member without its variable action: how far it spans at most, and which limits end it whatever the load.
-class Unloaded {
-public:
-    Unloaded(const Inputs& inputs, const Member& member, const LoadClass& load, double spacing)
-        : solver_(inputs, member, without_variable(load), {spacing, spacing}), cell_(solver_.permissible_span(spacing)),
-          lower_(search_range(inputs.brief.search, solver_.rules()).lower - solver_.rules().span_addition()) {}
-
-    /// From the lower bound to the longest span, in steps of whole centimetres.
-    [[nodiscard]] std::vector<double> spans() const {
-        if (!cell_.value || *cell_.value <= lower_) return {};
-        constexpr double centimetre = 10.0;
-        const double length = *cell_.value - lower_;
-        const double step = std::max(centimetre, std::floor(length / (points - 1) / centimetre) * centimetre);
-        std::vector<double> spans;
-        for (double span = std::ceil(lower_ / centimetre) * centimetre; span < *cell_.value; span += step) {
-            spans.push_back(span);
-        }
-        spans.push_back(*cell_.value);
-        return spans;
-    }
-
-    [[nodiscard]] std::optional<double> last_span(Limit limit) const {
-        const LimitOutcome& outcome = cell_.limits[index_of(limit)];
-        return outcome.kind == LimitOutcome::Kind::spans ? std::optional(outcome.clear_span) : std::nullopt;
-    }
-
-private:
-    static LoadClass without_variable(LoadClass load) {
-        load.variable = 0.0;
-        return load;
-    }
-
-    CellSolver solver_;
-    Cell cell_;
-    double lower_;
-};
+constexpr std::size_t points = 17;
 
 /// The top of the chart: room above the load class's own action, whatever short spans could carry.
 double chart_top(const LoadClass& load) {
     constexpr double least_top = 0.010; // 10 kN/m2
     return std::max(least_top, 4.0 * load.variable);
 }
+
+LoadClass with_variable(LoadClass load, double variable) {
+    load.variable = variable;
+    return load;
+}
+
+/// Clear spans of a chart: from where the load comes below the top to where no variable action is left.
+class ChartRange {
+public:
+    ChartRange(const Inputs& inputs, const Member& member, const LoadClass& load, double spacing)
+        : unloaded_(inputs, member, with_variable(load, 0.0), {spacing, spacing}),
+          cell_(unloaded_.permissible_span(spacing)) {
+        const CellSolver loaded(inputs, member, with_variable(load, chart_top(load)), {spacing, spacing});
+        const double lower = search_range(inputs.brief.search, loaded.rules()).lower - loaded.rules().span_addition();
+        from_ = loaded.permissible_span(spacing).value.value_or(lower);
+    }
+
+    /// In steps of whole centimetres.
+    [[nodiscard]] std::vector<double> spans() const {
+        if (!cell_.value || *cell_.value <= from_) return {};
+        constexpr double centimetre = 10.0;
+        const double length = *cell_.value - from_;
+        const double step = std::max(centimetre, std::ceil(length / (points - 1) / centimetre) * centimetre);
+        std::vector<double> spans;
+        for (double span = std::ceil(from_ / centimetre) * centimetre; span < *cell_.value; span += step) {
+            spans.push_back(span);
+        }
+        spans.push_back(*cell_.value);
+        return spans;
+    }
+
+    /// How far a limit allows to span whatever the load.
+    [[nodiscard]] std::optional<double> last_span(Limit limit) const {
+        const LimitOutcome& outcome = cell_.limits[index_of(limit)];
+        return outcome.kind == LimitOutcome::Kind::spans ? std::optional(outcome.clear_span) : std::nullopt;
+    }
+
+private:
+    CellSolver unloaded_;
+    Cell cell_;
+    double from_ = 0.0;
+};
 
 std::optional<double> shown(const std::optional<double>& load, double top) {
     return load && *load <= top ? load : std::nullopt;
@@ -80,8 +85,8 @@ std::optional<double> upright(const std::optional<double>& span, double longest)
 
 std::optional<LimitCurves> limit_curves(const Inputs& inputs, const Member& member, const LoadClass& load,
                                         double spacing) {
-    const Unloaded unloaded(inputs, member, load, spacing);
-    LimitCurves curves{member_name(member), load.name, spacing, unloaded.spans(), {}, {}, 0.0};
+    const ChartRange range(inputs, member, load, spacing);
+    LimitCurves curves{member_name(member), load.name, spacing, range.spans(), {}, {}, 0.0};
     if (curves.spans.empty()) return std::nullopt;
     curves.greatest_load = chart_top(load);
     const LoadSolver solver(inputs, member, load);
@@ -90,7 +95,7 @@ std::optional<LimitCurves> limit_curves(const Inputs& inputs, const Member& memb
     for (const LimitDefinition& definition : limit_definitions) {
         LimitCurves::Line line = line_of(definition.limit, at_spans, curves.greatest_load);
         const bool loads = std::any_of(line.loads.begin(), line.loads.end(), [](const auto& l) { return l; });
-        if (!loads) line.upright_at = upright(unloaded.last_span(definition.limit), curves.spans.back());
+        if (!loads) line.upright_at = upright(range.last_span(definition.limit), curves.spans.back());
         if (loads || line.upright_at) curves.lines.push_back(std::move(line));
     }
     for (const PermissibleLoad& at_span : at_spans) {

@@ -128,6 +128,7 @@ void check_limits_without_timber(SectionReader& limits) {
 }
 
 void check_spacings(BriefSections& sections, const Brief& brief, const std::vector<EntryMembers>& entries) {
+    const KeyRange& range = key_definition(section_definition("table"), "spacings_mm").usual; // in mm, as spacings are
     for (std::size_t t = 0; t < brief.tables.size(); ++t) {
         const TableRequest& table = brief.tables[t];
         bool timber = false;
@@ -137,11 +138,12 @@ void check_spacings(BriefSections& sections, const Brief& brief, const std::vect
                      (entries[i].timber && std::find(named.begin(), named.end(), brief.members[i].name) != named.end());
         }
         for (std::size_t i = 0; timber && i < table.spacings.size(); ++i) {
-            if (table.spacings[i] > usual_timber_spacing) {
+            const double spacing = table.spacings[i];
+            if (spacing > usual_timber_spacing && spacing <= range.greatest) { // beyond it is reported already
                 sections.tables[t].item_warning(
                     "spacings_mm", {i, table.spacings.size()}, "unusual",
-                    fmt::format("spacings_mm: {:g} mm is outside the usual range for timber, 200 to {:g} mm",
-                                table.spacings[i], usual_timber_spacing),
+                    fmt::format("spacings_mm: {:g} mm is outside the usual range for timber, {:g} to {:g} mm", spacing,
+                                range.least, usual_timber_spacing),
                     "it is used as it stands; check the number and its unit");
             }
         }
@@ -161,7 +163,7 @@ void check_materials(BriefSections& sections, const Brief& brief, const Catalogu
     }
     const bool timber = std::any_of(entries.begin(), entries.end(), [](const auto& entry) { return entry.timber; });
     const bool steel = std::any_of(entries.begin(), entries.end(), [](const auto& entry) { return entry.steel; });
-    if (timber || !steel) {
+    if (timber || brief.members.empty()) {
         check_limits_of_timber(sections.limits);
     }
     if (timber && !steel) {

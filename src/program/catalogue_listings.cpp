@@ -1,121 +1,131 @@
 // SPDX-License-Identifier: MIT
 #include "catalogue_listings.hpp"
 
-#include "spanledger/limits.hpp"
+#include "spanledger/writers/json_text.hpp"
 
 #include <fmt/format.h>
 
 #include <algorithm>
 #include <array>
+#include <stdexcept>
 
 namespace spanledger {
 namespace {
 
-std::string seen_mark(const Provenance& from) {
-    const char* mark = from.seen ? "seen" : "from memory";
-    return from.practice_own ? fmt::format("{}, practice's own", mark) : mark;
-}
-
 std::string duration_word(Duration duration) {
     constexpr std::array words{"permanent", "long", "medium", "short", "instantaneous"};
-    return words[static_cast<std::size_t>(duration)];
+    return words.at(static_cast<std::size_t>(duration));
 }
 
-std::string kind_word(Timber timber) {
-    constexpr std::array words{"solid softwood", "solid hardwood", "glulam", "LVL"};
-    return words[static_cast<std::size_t>(timber)];
-}
-
-Listing list_classes(const Catalogue& catalogue) {
-    Listing listing{"classes",
-                    {"class", "timber", "f_m_k_MPa", "f_v_k_MPa", "f_c_90_k_MPa", "E_0_mean_MPa", "E_0_05_MPa",
-                     "G_mean_MPa", "rho_k_kg_m3", "rho_mean_kg_m3", "standard", "source", "seen"},
+Listing list_timber_classes(const Catalogue& catalogue) {
+    Listing listing{"timber classes",
+                    columns_with_origin({"class", "material", "f_m_k_MPa", "f_v_k_MPa", "f_c_90_k_MPa", "E_0_mean_MPa",
+                                         "E_0_05_MPa", "G_mean_MPa", "rho_k_kg_m3", "rho_mean_kg_m3", "standard"}),
                     {}};
     for (const TimberClass& c : catalogue.timber_classes) {
-        listing.rows.push_back({c.name, kind_word(c.timber), c.f_m_k, c.f_v_k, c.f_c_90_k, c.E_0_mean, c.E_0_05,
-                                c.G_mean, c.rho_k, c.rho_mean, c.standard, c.provenance.source,
-                                seen_mark(c.provenance)});
+        listing.add({c.name, std::string(material_of(c.timber)), c.f_m_k, c.f_v_k, c.f_c_90_k, c.E_0_mean, c.E_0_05,
+                     c.G_mean, c.rho_k, c.rho_mean, c.standard},
+                    c.provenance);
     }
     return listing;
 }
 
-Listing list_series(const Catalogue& catalogue) {
-    Listing listing{"series", {"series", "region", "sizes_mm", "source", "seen"}, {}};
-    for (const TimberSize& size : catalogue.timber_sizes) {
-        const std::string text = fmt::format("{}x{}", size.b, size.h);
-        const auto known = std::find_if(listing.rows.begin(), listing.rows.end(), [&](const auto& row) {
-            return std::get<std::string>(row[0]) == size.series;
-        });
-        if (known != listing.rows.end()) {
-            std::get<std::string>((*known)[2]) += " " + text;
-        } else {
-            listing.rows.push_back(
-                {size.series, size.region, text, size.provenance.source, seen_mark(size.provenance)});
-        }
+Listing list_steel_grades(const Catalogue& catalogue) {
+    Listing listing{
+        "steel grades", columns_with_origin({"grade", "f_y_to_16_mm_MPa", "f_y_to_40_mm_MPa", "standard"}), {}};
+    for (const SteelGrade& g : catalogue.steel_grades) {
+        listing.add({g.name, g.f_y_16, maybe(g.f_y_40), g.standard}, g.provenance);
     }
     return listing;
 }
 
-Listing list_sections(const Catalogue& catalogue) {
-    Listing listing{"sections", {"section", "series", "b_mm", "h_mm", "W_mm3", "I_mm4", "source", "seen"}, {}};
-    for (const TimberSize& size : catalogue.timber_sizes) {
-        listing.rows.push_back({fmt::format("{}x{}", size.b, size.h), size.series, size.b, size.h,
-                                size.b * size.h * size.h / 6.0, size.b * size.h * size.h * size.h / 12.0,
-                                size.provenance.source, seen_mark(size.provenance)});
+Listing list_cold_formed_grades(const Catalogue& catalogue) {
+    Listing listing{"cold-formed grades", columns_with_origin({"grade", "f_yb_MPa", "standard"}), {}};
+    for (const ColdFormedGrade& g : catalogue.cold_formed_grades) {
+        listing.add({g.name, g.f_yb, g.standard}, g.provenance);
     }
     return listing;
 }
 
-Listing list_loads(const Catalogue& catalogue) {
-    Listing listing{"loads",
-                    {"category", "use", "roof", "duration", "psi0", "psi1", "psi2", "q_k_guide_kN_m2", "Q_k_guide_kN",
-                     "source", "seen"},
+std::vector<Listing> list_classes(const Catalogue& catalogue) {
+    return {list_timber_classes(catalogue), list_steel_grades(catalogue), list_cold_formed_grades(catalogue)};
+}
+
+std::vector<Listing> list_loads(const Catalogue& catalogue) {
+    constexpr double kN_m2 = 1000.0; // of 1 N/mm2
+    constexpr double kN = 0.001;     // of 1 N
+    Listing listing{"load categories",
+                    columns_with_origin({"category", "use", "roof", "duration", "psi0", "psi1", "psi2",
+                                         "q_k_guide_kN_m2", "Q_k_guide_kN"}),
                     {}};
-    const auto guide = [](const std::optional<double>& value, double factor) {
-        return value ? fmt::format("{}", *value * factor) : std::string();
-    };
     for (const LoadCategory& c : catalogue.load_categories) {
-        listing.rows.push_back({c.name, c.use, c.roof, duration_word(c.duration), c.psi.psi0, c.psi.psi1, c.psi.psi2,
-                                guide(c.q_k, 1000.0), guide(c.Q_k, 0.001), c.provenance.source,
-                                seen_mark(c.provenance)});
+        listing.add({c.name, c.use, c.roof, duration_word(c.duration), c.psi.psi0, c.psi.psi1, c.psi.psi2,
+                     maybe(in_unit(c.q_k, kN_m2)), maybe(in_unit(c.Q_k, kN))},
+                    c.provenance);
+    }
+    return {listing};
+}
+
+Listing list_combinations(const Catalogue& catalogue) {
+    constexpr std::array words{"none", "full", "combination value"};
+    Listing listing{"combinations",
+                    columns_with_origin({"combination", "set", "permanent_reduced_by_xi", "variable", "clause"}),
+                    {}};
+    for (const Combination& c : catalogue.combinations) {
+        listing.add(
+            {c.name, c.set, c.reduced_permanent, std::string(words.at(static_cast<std::size_t>(c.variable))), c.clause},
+            c.provenance);
     }
     return listing;
 }
 
-Listing list_parameters(const Catalogue& catalogue) {
+Listing list_service_factors(const Catalogue& catalogue) {
+    Listing listing{"service factors",
+                    columns_with_origin({"material", "service_class", "k_mod_permanent", "k_mod_long", "k_mod_medium",
+                                         "k_mod_short", "k_mod_instantaneous", "k_def"}),
+                    {}};
+    for (const ServiceFactors& f : catalogue.service_factors) {
+        listing.add({f.material, static_cast<double>(f.service_class), f.k_mod[0], f.k_mod[1], f.k_mod[2], f.k_mod[3],
+                     f.k_mod[4], f.k_def},
+                    f.provenance);
+    }
+    return listing;
+}
+
+std::vector<Listing> list_parameters(const Catalogue& catalogue) {
     Listing listing{"parameters",
-                    {"parameter", "value", "unit", "recommended", "set", "clause", "meaning", "source", "seen"},
+                    columns_with_origin({"parameter", "value", "unit", "recommended", "set", "clause", "meaning"}),
                     {}};
     for (const Parameter& p : catalogue.parameters) {
-        listing.rows.push_back({p.key, p.value, p.unit, p.recommended, p.set, p.clause, p.meaning,
-                                p.provenance.source, seen_mark(p.provenance)});
+        listing.add({p.key, p.value, p.unit, p.recommended, p.set, p.clause, p.meaning}, p.provenance);
     }
-    return listing;
+    return {listing, list_combinations(catalogue), list_service_factors(catalogue)};
 }
 
-Listing list_limits(const Catalogue& /*catalogue*/) {
-    Listing listing{"limits", {"limit", "letter", "about"}, {}};
-    for (const LimitDefinition& d : limit_definitions) {
-        listing.rows.push_back({std::string(d.name), std::string(1, d.letter), std::string(d.about)});
-    }
-    return listing;
+std::vector<Listing> list_sources(const Catalogue& catalogue) {
+    Listing listing{"sources", {"source", "edition", "title", "note"}, {}};
+    for (const Source& s : catalogue.sources) listing.rows.push_back({s.key, s.edition, s.title, s.note});
+    return {listing};
 }
 
-Listing list_sources(const Catalogue& catalogue) {
-    Listing listing{"sources", {"source", "title", "edition", "note"}, {}};
-    for (const Source& s : catalogue.sources) listing.rows.push_back({s.key, s.title, s.edition, s.note});
-    return listing;
-}
+struct Topic {
+    std::string_view name;
+    std::vector<Listing> (*list)(const Catalogue& catalogue);
+};
 
 constexpr std::array topics{
-    CatalogueTopic{"classes", list_classes},       CatalogueTopic{"series", list_series},
-    CatalogueTopic{"sections", list_sections},     CatalogueTopic{"loads", list_loads},
-    CatalogueTopic{"parameters", list_parameters}, CatalogueTopic{"limits", list_limits},
-    CatalogueTopic{"sources", list_sources},
+    Topic{"classes", list_classes}, Topic{"series", list_series},         Topic{"sections", list_sections},
+    Topic{"loads", list_loads},     Topic{"parameters", list_parameters}, Topic{"sources", list_sources},
 };
 
 } // namespace
 
-std::span<const CatalogueTopic> catalogue_topics() noexcept { return topics; }
+std::vector<Listing> catalogue_listings(std::string_view topic, const Catalogue& catalogue, Detail detail) {
+    if (topic == "limits") return list_limits(catalogue, detail);
+    const auto* const found =
+        std::find_if(topics.begin(), topics.end(), [&](const Topic& row) { return row.name == topic; });
+    if (found == topics.end()) throw std::out_of_range("a topic of the option table has no listing");
+    return found->list(catalogue);
+}
 
 } // namespace spanledger

@@ -47,10 +47,12 @@ UsageError unknown_command(const std::string& name) {
     return {fmt::format("unknown command '{}'", name), did_you_mean(name, names)};
 }
 
-UsageError unknown_option(const std::string& option, const CommandRow* command) {
+UsageError unknown_option(std::string option, const CommandRow* command) {
+    option.erase(std::min(option.find('='), option.size()));
     const std::string bare = option.substr(std::min(option.find_first_not_of('-'), option.size()));
     if (command == nullptr) {
-        return {fmt::format("unknown option '{}' before the command", option), did_you_mean(option, option_names(command))};
+        return {fmt::format("unknown option '{}' before the command", option),
+                did_you_mean(option, option_names(command))};
     }
     if (not_covered_yet(command->name, bare)) {
         return {fmt::format("the option '{}' of {} is not covered yet", option, command->name),
@@ -73,7 +75,8 @@ UsageError usage_error(const po::error& error, const CommandRow* command) {
         if (syntax->kind() == po::invalid_syntax::extra_parameter) {
             return {fmt::format("the option '{}' takes no argument", option), fmt::format("write {} alone", option)};
         }
-        return {fmt::format("the option '{}' needs an argument", option), fmt::format("write {} and its argument", option)};
+        return {fmt::format("the option '{}' needs an argument", option),
+                fmt::format("write {} and its argument", option)};
     }
     return {error.what(), "see spanledger --help"};
 }
@@ -144,8 +147,7 @@ ParsedCommandLine help_for(const CommandRow* command) {
 
 ParsedCommandLine parse_command_line(std::span<const std::string> arguments) {
     std::vector<std::string> rest(arguments.begin(), arguments.end());
-    const auto named = std::find_if(rest.begin(), rest.end(),
-                                    [](const std::string& argument) {
+    const auto named = std::find_if(rest.begin(), rest.end(), [](const std::string& argument) {
         return argument.empty() || argument[0] != '-' || argument == "-";
     });
     const CommandRow* const command = named == rest.end() ? nullptr : find_command(*named);

@@ -6,7 +6,9 @@
 namespace spanledger {
 namespace {
 
-std::string separated(std::span<const std::string_view> words) { return fmt::format("{}", fmt::join(words, " ")); }
+std::string separated(std::span<const std::string_view> words) {
+    return fmt::format("{}", fmt::join(words, " "));
+}
 
 std::string command_names() {
     std::string names;
@@ -16,7 +18,8 @@ std::string command_names() {
 
 std::string option_words(const CommandRow& command) {
     std::string words;
-    for (const OptionRow& row : all_options(command)) words += fmt::format("{}--{}", words.empty() ? "" : " ", row.name);
+    for (const OptionRow& row : all_options(command))
+        words += fmt::format("{}--{}", words.empty() ? "" : " ", row.name);
     return words;
 }
 
@@ -31,8 +34,8 @@ std::string plain(std::string_view text) {
 
 /// The two ways in which zsh is told of an option: with its letter, and without.
 std::string zsh_option(const OptionRow& row) {
-    const std::string rest = fmt::format("[{}]{}", plain(row.meaning),
-                                         row.argument.empty() ? "" : fmt::format(":{}:_files", row.argument));
+    const std::string rest =
+        fmt::format("[{}]{}", plain(row.meaning), row.argument.empty() ? "" : fmt::format(":{}:_files", row.argument));
     if (row.letter == '\0') return fmt::format("'--{}{}'", row.name, rest);
     return fmt::format("'(-{0} --{1})'{{-{0},--{1}}}'{2}'", row.letter, row.name, rest);
 }
@@ -102,8 +105,8 @@ std::string fish_completion() {
     const std::string no_command = fmt::format("not __fish_seen_subcommand_from {}", command_names());
     std::string text = "# fish completion for spanledger\n";
     for (const CommandRow& row : command_table()) {
-        text += fmt::format("complete -c spanledger -n '{}' -f -a {} -d '{}'\n", no_command, row.name,
-                            plain(row.meaning));
+        text +=
+            fmt::format("complete -c spanledger -n '{}' -f -a {} -d '{}'\n", no_command, row.name, plain(row.meaning));
         const std::string this_command = fmt::format("__fish_seen_subcommand_from {}", row.name);
         if (!row.words.empty()) {
             text += fmt::format("complete -c spanledger -n '{}' -f -a '{}'\n", this_command, separated(row.words));

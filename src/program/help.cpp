@@ -8,7 +8,7 @@
 namespace spanledger {
 namespace {
 
-constexpr std::size_t meaning_column = 26;
+constexpr std::size_t meaning_column = 27;
 constexpr std::size_t command_column = 14;
 constexpr std::size_t widest_line = 80;
 
@@ -97,10 +97,11 @@ std::string general_help() {
 }
 
 std::string command_help(const CommandRow& row) {
-    return fmt::format("Example:\n{}\nUsage: spanledger {} {} [OPTIONS]\n\n{}\n\nOptions:\n{}\n"
+    const std::string operands = row.words.empty() ? "" : wrapped(operand_words(row), 0) + "\n";
+    return fmt::format("Example:\n{}\nUsage: spanledger {} {} [OPTIONS]\n\n{}\n{}\nOptions:\n{}\n"
                        "Options of every command:\n{}",
-                       indented(row.example), row.name, row.operands, wrapped(row.meaning, 0),
-                       options_text(row.options), options_text(general_options()));
+                       indented(row.example), row.name, row.operands, wrapped(fmt::format("To {}.", row.meaning), 0),
+                       operands, options_text(row.options), options_text(general_options()));
 }
 
 } // namespace spanledger

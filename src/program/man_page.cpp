@@ -4,7 +4,6 @@
 
 #include <fmt/format.h>
 
-
 namespace spanledger {
 namespace {
 
@@ -46,7 +45,8 @@ std::string options_text(std::span<const OptionRow> rows) {
 std::string commands_text() {
     std::string text;
     for (const CommandRow& row : command_table()) {
-        text += fmt::format(".SS spanledger {} {}\nTo {}.\n{}", row.name, row.operands, roff(row.meaning),
+        const std::string operands = row.words.empty() ? "" : roff(operand_words(row)) + "\n";
+        text += fmt::format(".SS spanledger {} {}\nTo {}.\n{}{}", row.name, row.operands, roff(row.meaning), operands,
                             options_text(row.options));
     }
     return text;
@@ -78,9 +78,10 @@ std::string environment_text() {
 }
 
 std::string examples_text() {
-    std::string text = ".SH EXAMPLES\n";
+    std::string text;
     for (const CommandRow& row : command_table()) {
-        text += fmt::format("To {}:\n.PP\n.EX\n{}\n.EE\n.PP\n", roff(row.meaning), roff(row.example));
+        const char* const between = text.empty() ? ".SH EXAMPLES" : ".PP";
+        text += fmt::format("{}\nTo {}:\n.PP\n.EX\n{}\n.EE\n", between, roff(row.meaning), roff(row.example));
     }
     return text;
 }
@@ -88,8 +89,9 @@ std::string examples_text() {
 std::string packagers_text() {
     std::string words;
     for (const std::string_view word : document_words()) words += fmt::format("{}{}", words.empty() ? "" : ", ", word);
-    return fmt::format(".SH FOR PACKAGERS\n\"spanledger {} \\fIDOCUMENT\\fR\" prints what comes with the program: {}.\n",
-                       roff("--print"), roff(words));
+    return fmt::format(
+        ".SH FOR PACKAGERS\n\"spanledger {} \\fIDOCUMENT\\fR\" prints what comes with the program: {}.\n",
+        roff("--print"), roff(words));
 }
 
 } // namespace

@@ -46,10 +46,8 @@ constexpr std::array commands{
                "spanledger check brief.toml --member \"C24 47x220\" --spacing 400 \\\n"
                "    --load \"Dwelling, G 0.50\" --clear-span 3.9m",
                check_options},
-    CommandRow{"catalogue", "[TOPIC [NAME]]", 0, 2,
-               "print what is known, with its sources; TOPIC is classes, series, sections, loads, parameters, limits or "
-               "sources",
-               "spanledger catalogue classes C24", catalogue_options, topics},
+    CommandRow{"catalogue", "[TOPIC [NAME]]", 0, 2, "print what is known, with its sources",
+               "spanledger catalogue classes C24", catalogue_options, "TOPIC", topics},
 };
 
 constexpr std::array general{
@@ -62,34 +60,49 @@ constexpr std::array general{
 constexpr std::array<std::string_view, 5> documents{"man", "bash", "zsh", "fish", "input-reference"};
 
 constexpr std::array statuses{
-    ExitStatusRow{0, "all well"},
-    ExitStatusRow{1, "a check failed or is not covered"},
-    ExitStatusRow{2, "bad input or usage"},
-    ExitStatusRow{3, "could not write"},
-    ExitStatusRow{4, "internal fault"},
-    ExitStatusRow{130, "interrupted"},
+    ExitStatusRow{0, "all well"},           ExitStatusRow{1, "a check failed or is not covered"},
+    ExitStatusRow{2, "bad input or usage"}, ExitStatusRow{3, "could not write"},
+    ExitStatusRow{4, "internal fault"},     ExitStatusRow{130, "interrupted"},
 };
 
 using Words = std::pair<std::string_view, std::string_view>;
 
 constexpr std::array later{
-    Words{"compare", ""},       Words{"changes", ""},      Words{"check", "schedule"},
-    Words{"check", "against"},  Words{"check", "out"},     Words{"check", "sheet"},
-    Words{"tables", "since"},
+    Words{"compare", ""},  Words{"changes", ""},    Words{"check", "schedule"}, Words{"check", "against"},
+    Words{"check", "out"}, Words{"check", "sheet"}, Words{"tables", "since"},
 };
 
 } // namespace
 
-std::span<const CommandRow> command_table() noexcept { return commands; }
-std::span<const OptionRow> general_options() noexcept { return general; }
-std::span<const std::string_view> document_words() noexcept { return documents; }
-std::span<const std::string_view> catalogue_words() noexcept { return topics; }
-std::span<const ExitStatusRow> exit_statuses() noexcept { return statuses; }
+std::span<const CommandRow> command_table() noexcept {
+    return commands;
+}
+std::span<const OptionRow> general_options() noexcept {
+    return general;
+}
+std::span<const std::string_view> document_words() noexcept {
+    return documents;
+}
+std::span<const std::string_view> catalogue_words() noexcept {
+    return topics;
+}
+std::span<const ExitStatusRow> exit_statuses() noexcept {
+    return statuses;
+}
 
 std::vector<OptionRow> all_options(const CommandRow& command) {
     std::vector<OptionRow> rows(command.options.begin(), command.options.end());
     rows.insert(rows.end(), general.begin(), general.end());
     return rows;
+}
+
+std::string operand_words(const CommandRow& command) {
+    std::string text;
+    for (std::size_t i = 0; i < command.words.size(); ++i) {
+        const bool last = i + 1 == command.words.size();
+        text.append(i == 0 ? "" : last ? " or " : ", ").append(command.words[i]);
+    }
+    return text.empty() ? text : std::string(command.choice) + " is " + text + ".";
 }
 
 const CommandRow* find_command(std::string_view name) noexcept {

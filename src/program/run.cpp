@@ -70,7 +70,8 @@ int run_line(std::span<const std::string> arguments, const Surroundings& around)
 int delivered(int status, const Surroundings& around) {
     around.out.flush();
     const bool has_results = status == exit_status::well || status == exit_status::failed_check;
-    return has_results && !around.out ? could_not_write(around, {"standard output", "not all of it was taken"}) : status;
+    return has_results && !around.out ? could_not_write(around, {"standard output", "not all of it was taken"})
+                                      : status;
 }
 
 int internal_fault(const Surroundings& around, std::string what) {

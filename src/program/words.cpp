@@ -46,7 +46,7 @@ void report_problems(const Diagnostics& diagnostics, const CommandLine& line, co
 std::optional<Inputs> read_and_report(const std::string& brief, const CommandLine& line, const Surroundings& around) {
     Diagnostics diagnostics;
     std::optional<Inputs> inputs = read_inputs(brief, diagnostics);
-    stop_if_asked(around); // what was read may be only a part
+    if (brief == "-") stop_if_asked(around); // a stopped wait for standard input looks like its end
     report_problems(diagnostics, line, around);
     return inputs;
 }

@@ -237,6 +237,8 @@ private:
 
 } // namespace
 
-void write_brief(JsonText& json, const Brief& brief) { BriefWriter(json, brief).write(); }
+void write_brief(JsonText& json, const Brief& brief) {
+    BriefWriter(json, brief).write();
+}
 
 } // namespace spanledger

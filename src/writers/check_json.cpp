@@ -143,7 +143,9 @@ private:
 
 } // namespace
 
-void write_check(JsonText& json, const CheckResult& check) { CheckWriter(json, check).write(); }
+void write_check(JsonText& json, const CheckResult& check) {
+    CheckWriter(json, check).write();
+}
 
 std::string check_json(const CheckResult& check) {
     constexpr std::size_t levels_in_lines = 2;

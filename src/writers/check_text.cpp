@@ -35,13 +35,23 @@ std::string utilisation_text(double utilisation) {
 /// In m, rounded down to 1 mm.
 std::string metres_down(double mm) {
     constexpr double rounding = 1e-7;
-    return fmt::format("{:.3f} m", std::floor(mm + rounding) * m);
+    return fmt::format("{:.3f}", std::floor(mm + rounding) * m);
+}
+
+/// A printed span in m, as many decimals as it has.
+std::string metres(double mm) {
+    return fmt::format("{:.10g} m", mm * m);
+}
+
+/// Four figures, but whole numbers in full.
+std::string figures(double value) {
+    return value >= 1000.0 ? fmt::format("{:.0f}", value) : fmt::format("{:.4g}", value);
 }
 
 std::string span_text(const LimitOutcome& outcome) {
     switch (outcome.kind) {
     case LimitOutcome::Kind::spans: return metres_down(outcome.clear_span);
-    case LimitOutcome::Kind::never_reached: return "never reached";
+    case LimitOutcome::Kind::never_reached: return "never";
     case LimitOutcome::Kind::fails_at_once: return "none";
     case LimitOutcome::Kind::not_checked: break;
     }
@@ -95,12 +105,17 @@ private:
         std::stable_sort(checked.begin(), checked.end(),
                          [](const auto* a, const auto* b) { return a->utilisation > b->utilisation; });
         if (checked.empty()) return;
-        out_.heading("Limits, worst first");
-        TextTable table({{"limit", false}, {"demand", true}, {"resistance", true}, {"unit", false},
-                         {"utilisation", true}, {"permissible", true}, {"clause", false}});
+        out_.heading("Limits, worst first; span: the limit's own permissible clear span");
+        TextTable table({{"limit", false},
+                         {"demand", true},
+                         {"resistance", true},
+                         {"unit", false},
+                         {"utilisation", true},
+                         {"span, m", true},
+                         {"clause", false}});
         for (const LimitCheck* limit : checked) {
-            table.add({std::string(definition_of(limit->limit).name), fmt::format("{:.4g}", limit->demand),
-                       fmt::format("{:.4g}", limit->resistance), limit->unit, utilisation_text(limit->utilisation),
+            table.add({std::string(definition_of(limit->limit).name), figures(limit->demand),
+                       figures(limit->resistance), limit->unit, utilisation_text(limit->utilisation),
                        span_text(limit->outcome), limit->clause});
         }
         out_.table(table);
@@ -130,12 +145,12 @@ private:
         if (!check_->permissible) {
             out_.fact("clear span", "none: " + check_->no_span_reason);
         } else {
-            std::string words = metres_down(*check_->permissible);
+            std::string words = metres_down(*check_->permissible) + " m";
             words += check_->governing ? fmt::format(", governed by {}", definition_of(*check_->governing).name)
                                        : fmt::format(", {}", check_->no_span_reason);
             out_.fact("clear span", words);
         }
-        if (check_->printed) out_.fact("in a table", fmt::format("{} m", check_->printed.value() * m));
+        if (check_->printed) out_.fact("in a table", metres(*check_->printed));
         if (check_->permissible_load) {
             // Rounded down to two decimals.
             const double hundredths = std::floor(*check_->permissible_load * 1e5 + 1e-7);
@@ -167,7 +182,8 @@ private:
         }
         out_.table(table);
         if (check_->bearing_length_needed) {
-            out_.fact("bearing length needed", fmt::format("{:.0f} mm", std::ceil(*check_->bearing_length_needed - 1e-9)));
+            out_.fact("bearing length needed",
+                      fmt::format("{:.0f} mm", std::ceil(*check_->bearing_length_needed - 1e-9)));
         }
     }
 
@@ -184,7 +200,7 @@ private:
         if (!other) return;
         std::string words = fmt::format("{} at {} mm: {}, utilisation {}", other->member, other->spacing,
                                         other->passes ? "passes" : "fails", utilisation_text(other->utilisation));
-        if (other->permissible) words += fmt::format(", clear span up to {} m", *other->permissible * m);
+        if (other->permissible) words += ", clear span up to " + metres(*other->permissible);
         out_.fact(name, words);
     }
 
@@ -194,6 +210,8 @@ private:
 
 } // namespace
 
-std::string check_text(const CheckResult& check) { return CheckText(check).write(); }
+std::string check_text(const CheckResult& check) {
+    return CheckText(check).write();
+}
 
 } // namespace spanledger

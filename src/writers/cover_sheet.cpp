@@ -18,7 +18,8 @@ enum Column : std::uint32_t { label, words, between, second_label, second_words 
 
 const TableResult* first_with_value(const Issue& issue) {
     const auto found = std::find_if(issue.tables.begin(), issue.tables.end(), [](const TableResult& table) {
-        return std::any_of(table.cells.begin(), table.cells.end(), [](const Cell& cell) { return cell.value.has_value(); });
+        return std::any_of(table.cells.begin(), table.cells.end(),
+                           [](const Cell& cell) { return cell.value.has_value(); });
     });
     return found == issue.tables.end() ? nullptr : &*found;
 }
@@ -43,7 +44,8 @@ public:
 
 private:
     void titles() {
-        pen_.paragraph(label, practice_->title.empty() ? "Joist span tables" : practice_->title, title_style, pen_.width());
+        pen_.paragraph(label, practice_->title.empty() ? "Joist span tables" : practice_->title, title_style,
+                       pen_.width());
         pen_.heading(issue_mark(*practice_), mark_style);
         pen_.gap(5.0);
     }
@@ -109,7 +111,8 @@ private:
                  {.size = 9.0, .bold = true});
         if (issue_->brief.search.rounding == Rounding::nearest) {
             labelled("Rounding",
-                     "For reproducing printed tables: spans are " + rounding_words(issue_->brief.search) + ", not down.",
+                     "For reproducing printed tables: spans are " + rounding_words(issue_->brief.search) +
+                         ", not down.",
                      {.size = 9.0, .bold = true});
         }
         if (!practice_->notes.empty()) labelled("Notes", practice_->notes, running_text);
@@ -138,8 +141,8 @@ private:
     [[nodiscard]] std::vector<KindWords> kinds_in_use() const {
         std::vector<KindWords> kinds;
         for (const TableResult& table : issue_->tables) {
-            const bool known = std::any_of(kinds.begin(), kinds.end(),
-                                           [&](const KindWords& kind) { return kind.kind == table.kind; });
+            const bool known =
+                std::any_of(kinds.begin(), kinds.end(), [&](const KindWords& kind) { return kind.kind == table.kind; });
             if (!known) kinds.push_back(words_of(table.kind));
         }
         return kinds;
@@ -149,7 +152,8 @@ private:
         section("How to read a cell");
         const TableResult* table = first_with_value(*issue_);
         if (table == nullptr) {
-            pen_.paragraph(label, "No cell of this issue holds a value: every cell says why.", running_text, pen_.width());
+            pen_.paragraph(label, "No cell of this issue holds a value: every cell says why.", running_text,
+                           pen_.width());
             return;
         }
         const auto found = std::find_if(table->cells.begin(), table->cells.end(),
@@ -177,11 +181,10 @@ private:
         const KindWords& kind = words_of(table.kind);
         const RowHead& head = table.rows[row];
         const ColumnHead& over = table.columns[column];
-        const std::string shown = kind.shows_text
-                                      ? cell.text
-                                      : fmt::format("{:.{}f}{}{}", *cell.value * kind.scale,
-                                                    decimals_of(kind, issue_->brief.search), kind.unit.empty() ? "" : " ",
-                                                    kind.unit);
+        const std::string shown = kind.shows_text ? cell.text
+                                                  : fmt::format("{:.{}f}{}{}", *cell.value * kind.scale,
+                                                                decimals_of(kind, issue_->brief.search),
+                                                                kind.unit.empty() ? "" : " ", kind.unit);
         const auto& span = head.span ? head.span : over.span;
         return fmt::format("{}{}{} at {} mm spacing under the load class {}{}: {} {}. {}", head.material_class,
                            head.section.empty() ? "" : " ", head.section, over.spacing, over.load,
@@ -198,7 +201,8 @@ private:
     static std::string limit_words(const Cell& cell) {
         if (!cell.governing) return fmt::format("The mark {} says: {}.", no_limit_mark, cell.reason);
         const LimitDefinition& limit = definition_of(*cell.governing);
-        std::string text = fmt::format("The letter {} and the fill name the limit that governs: {}.", limit.letter, limit.about);
+        std::string text =
+            fmt::format("The letter {} and the fill name the limit that governs: {}.", limit.letter, limit.about);
         if (cell.next) text += fmt::format(" The next limit is: {}.", definition_of(*cell.next).about);
         return text;
     }
@@ -228,12 +232,13 @@ private:
         const auto own = count([](const SourceLine& line) { return line.practice_own; });
         const auto seen = count([](const SourceLine& line) { return line.seen && !line.practice_own; });
         const auto recalled = count([](const SourceLine& line) { return !line.seen && !line.practice_own; });
-        pen_.paragraph(label,
-                       fmt::format("{} catalogue rows and parameters are in use: {} seen in their source, {} recalled from "
-                                   "memory, {} the practice's own. Recalled values must be confirmed; the sheet Sources "
-                                   "marks each.",
-                                   issue_->sources.size(), seen, recalled, own),
-                       running_text, pen_.width());
+        pen_.paragraph(
+            label,
+            fmt::format("{} catalogue rows and parameters are in use: {} seen in their source, {} recalled from "
+                        "memory, {} the practice's own. Recalled values must be confirmed; the sheet Sources "
+                        "marks each.",
+                        issue_->sources.size(), seen, recalled, own),
+            running_text, pen_.width());
     }
 
     void identity(const std::string& fingerprint) {

@@ -29,8 +29,9 @@ void append_utilisation(std::string& line, double utilisation) {
 }
 
 std::string header() {
-    std::string line = "table,kind,material,class,section,spacing_mm,load,clear_span_m,load_kN_m2,utilisation,governing,"
-                       "next_limit,reason";
+    std::string line =
+        "table,kind,material,class,section,spacing_mm,load,clear_span_m,load_kN_m2,utilisation,governing,"
+        "next_limit,reason";
     for (const LimitDefinition& definition : limit_definitions) {
         std::string name(definition.name);
         std::replace(name.begin(), name.end(), ' ', '_');
@@ -48,8 +49,8 @@ public:
           span_decimals_(decimals_of_step(issue.brief.search.step)) {}
 
     void write() {
-        const std::string start = fmt::format("{},{},{},", csv_field(table_->name), words_->name,
-                                              csv_field(table_->material));
+        const std::string start =
+            fmt::format("{},{},{},", csv_field(table_->name), words_->name, csv_field(table_->material));
         std::vector<std::string> columns;
         for (const ColumnHead& column : table_->columns) {
             columns.push_back(fmt::format(",{},{},", column.spacing, csv_field(column.load)));
@@ -75,7 +76,8 @@ private:
         const auto& given = table_->rows[row].span ? table_->rows[row].span : table_->columns[column].span;
         clear_span(given, cell);
         *text_ += ',';
-        if (table_->kind == TableKind::permissible_load && cell.value) number(*cell.value * words_->scale, words_->decimals);
+        if (table_->kind == TableKind::permissible_load && cell.value)
+            number(*cell.value * words_->scale, words_->decimals);
         *text_ += ',';
         if (cell.value) append_utilisation(*text_, cell.utilisation);
         *text_ += ',';
@@ -98,9 +100,7 @@ private:
         }
     }
 
-    void number(double value, int decimals) {
-        fmt::format_to(std::back_inserter(*text_), "{:.{}f}", value, decimals);
-    }
+    void number(double value, int decimals) { fmt::format_to(std::back_inserter(*text_), "{:.{}f}", value, decimals); }
 
     void limit(const LimitOutcome& outcome) {
         *text_ += ',';
@@ -118,7 +118,8 @@ private:
 
 std::string csv_field(std::string_view text) {
     std::string field(text);
-    const bool like_formula = !field.empty() && std::string_view("=+-@\t\r").find(field.front()) != std::string_view::npos;
+    const bool like_formula =
+        !field.empty() && std::string_view("=+-@\t\r").find(field.front()) != std::string_view::npos;
     if (like_formula) field.insert(0, 1, '\'');
     if (field.find_first_of(",\"\r\n") == std::string::npos) return field;
     std::string quoted = "\"";

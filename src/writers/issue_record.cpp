@@ -104,8 +104,9 @@ private:
         json_.key("cell_fields");
         json_.value(std::vector<std::string>{"value", "text", "utilisation", "governing", "next", "permissible",
                                              "reason", "clear_spans_mm"});
-        json_.field("clear_spans_mm", "one per limit of limits_in_cells: its own permissible clear span, unrounded; null: "
-                                      "never reached; 0: exceeded at the lower bound; false: not checked");
+        json_.field("clear_spans_mm",
+                    "one per limit of limits_in_cells: its own permissible clear span, unrounded; null: "
+                    "never reached; 0: exceeded at the lower bound; false: not checked");
     }
 
     void table(const TableResult& table) {
@@ -223,6 +224,8 @@ IssueRecord issue_record(const Issue& issue) {
     return record;
 }
 
-void fill_fingerprint(Issue& issue) { issue.fingerprint = issue_record(issue).fingerprint; }
+void fill_fingerprint(Issue& issue) {
+    issue.fingerprint = issue_record(issue).fingerprint;
+}
 
 } // namespace spanledger

@@ -5,6 +5,7 @@
 #include "spanledger/writers/text_lines.hpp"
 #include "spanledger/writers/xlsx_book.hpp"
 
+#include <memory>
 #include <string>
 #include <vector>
 
@@ -22,9 +23,19 @@ inline const xlsx::Style running_text{.size = 9.0};
 /// Points between the margins of an A4 page in landscape, less a little.
 inline constexpr double page_width = 770.0;
 
+/// What a sheet must know of all the cells of its table before it writes the first.
+struct TableFacts {
+    double cell_width = 0.0;          ///< points
+    std::vector<std::string> reasons; ///< why cells have no value, each once in the order met; cells give its number
+    std::vector<Limit> limits;        ///< whose letters may stand in it: checked, or in a cell all the same
+};
+
+[[nodiscard]] TableFacts facts_of(const TableResult& table, const SearchRange& search);
+
 /// Columns [first, last) of a table that stand on one sheet.
 struct TablePart {
     const TableResult* table = nullptr;
+    std::shared_ptr<const TableFacts> facts{};
     std::size_t number = 1; ///< of the table in the issue
     std::size_t part = 1;
     std::size_t parts = 1;
@@ -51,6 +62,7 @@ struct CoverWords {
 void write_cover(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue, const CoverWords& words);
 void write_basis(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue);
 void write_table(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue, const TablePart& part);
+void write_curves(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue, const LimitCurves& curves);
 void write_sources(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue);
 
 /// Header and footer of every sheet: practice, title, number, revision, page n of N.

@@ -48,19 +48,28 @@ std::string sheet_name(const TablePart& part) {
 
 } // namespace
 
-WriteResult write_workbook(const Issue& issue, const std::string& file, const std::function<std::string()>& fingerprint) {
+WriteResult write_workbook(const Issue& issue, const std::string& file,
+                           const std::function<std::string()>& fingerprint) {
     xlsx::Book book(file, properties_of(issue));
     SheetNames names;
     CoverWords words;
     xlsx::Sheet& cover = book.add_sheet(names.unique("Cover"));
     xlsx::Sheet& basis = book.add_sheet(names.unique("Basis"));
-    words.sheets.push_back({basis.name(), "Every choice, parameter, limit and assumption in force, with clause and origin"});
+    words.sheets.push_back(
+        {basis.name(), "Every choice, parameter, limit and assumption in force, with clause and origin"});
     write_basis(book, basis, issue);
     std::vector<TablePart> parts = all_parts(issue);
     for (TablePart& part : parts) {
         part.sheet = names.unique(sheet_name(part));
         words.sheets.push_back({part.sheet, holds(part)});
         write_table(book, book.add_sheet(part.sheet), issue, part);
+    }
+    for (const LimitCurves& curves : issue.curves) {
+        xlsx::Sheet& sheet = book.add_sheet(names.unique(fmt::format("Curves {}", curves.member)));
+        words.sheets.push_back(
+            {sheet.name(), fmt::format("Limit curves: permissible load against span, {} at {} mm, {}", curves.member,
+                                       curves.spacing, curves.load)});
+        write_curves(book, sheet, issue, curves);
     }
     xlsx::Sheet& sources = book.add_sheet(names.unique("Sources"));
     words.sheets.push_back({sources.name(), "Every catalogue row and parameter in use, its source, seen or recalled"});

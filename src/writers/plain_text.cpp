@@ -26,7 +26,9 @@ std::size_t bytes_of(std::string_view text, std::size_t columns) {
     return bytes;
 }
 
-void trim_right(std::string& text) { text.erase(text.find_last_not_of(' ') + 1); }
+void trim_right(std::string& text) {
+    text.erase(text.find_last_not_of(' ') + 1);
+}
 
 } // namespace
 
@@ -108,7 +110,9 @@ void PlainText::fact(std::string_view name, std::string_view words) {
     }
 }
 
-void PlainText::table(const TextTable& table) { text_ += table.text(indent); }
+void PlainText::table(const TextTable& table) {
+    text_ += table.text(indent);
+}
 
 void PlainText::list(std::string_view name, const std::vector<std::string>& items) {
     if (items.empty()) return;

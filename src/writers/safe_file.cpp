@@ -15,7 +15,9 @@
 namespace spanledger {
 namespace {
 
-std::string reason_of(int error) { return std::generic_category().message(error); }
+std::string reason_of(int error) {
+    return std::generic_category().message(error);
+}
 
 std::string name_beside(const std::filesystem::path& target, int attempt) {
     const std::string name = fmt::format(".{}.part-{}-{}", target.filename().string(), ::getpid(), attempt);
@@ -54,7 +56,9 @@ TemporaryFile::~TemporaryFile() {
     if (!problem_ && !placed_) ::unlink(path_.c_str());
 }
 
-WriteError TemporaryFile::failure(int error) const { return {target_, reason_of(error)}; }
+WriteError TemporaryFile::failure(int error) const {
+    return {target_, reason_of(error)};
+}
 
 WriteResult TemporaryFile::write(std::string_view text) {
     while (!text.empty()) {

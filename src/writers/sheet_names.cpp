@@ -13,7 +13,9 @@ namespace {
 constexpr std::size_t longest_name = 31; // UTF-16 units
 
 /// UTF-16 units of the character that begins with this byte: characters of four bytes take two.
-std::size_t units_of(char first_byte) { return static_cast<unsigned char>(first_byte) >= 0xF0U ? 2 : 1; }
+std::size_t units_of(char first_byte) {
+    return static_cast<unsigned char>(first_byte) >= 0xF0U ? 2 : 1;
+}
 
 /// The longest beginning with at most `units` UTF-16 units.
 std::string_view beginning(std::string_view text, std::size_t units) {

@@ -22,14 +22,18 @@ std::string joined(const std::vector<std::string>& lines, std::size_t first) {
 
 } // namespace
 
-Font font_of(const xlsx::Style& style) { return {style.size, style.bold}; }
+Font font_of(const xlsx::Style& style) {
+    return {style.size, style.bold};
+}
 
 SheetPen::SheetPen(xlsx::Book& book, xlsx::Sheet& sheet, std::vector<double> widths)
     : book_(&book), sheet_(&sheet), widths_(std::move(widths)) {
     for (std::uint32_t column = 0; column < widths_.size(); ++column) sheet_->column_width(column, widths_[column]);
 }
 
-double SheetPen::width() const noexcept { return std::accumulate(widths_.begin(), widths_.end(), 0.0); }
+double SheetPen::width() const noexcept {
+    return std::accumulate(widths_.begin(), widths_.end(), 0.0);
+}
 
 void SheetPen::end_row(double points) {
     sheet_->row_height(row_, points);
@@ -37,7 +41,9 @@ void SheetPen::end_row(double points) {
     ++row_;
 }
 
-void SheetPen::gap(double points) { end_row(points); }
+void SheetPen::gap(double points) {
+    end_row(points);
+}
 
 void SheetPen::row(const std::vector<std::string>& texts, const xlsx::Style& style) {
     std::vector<std::vector<std::string>> lines;

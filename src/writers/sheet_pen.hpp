@@ -34,7 +34,7 @@ public:
     [[nodiscard]] xlsx::At at(std::uint32_t column) const noexcept { return {row_, column}; }
     [[nodiscard]] std::uint32_t next_row() const noexcept { return row_; }
     [[nodiscard]] double height() const noexcept { return height_; } ///< of all rows so far
-    [[nodiscard]] double width() const noexcept; ///< of all columns
+    [[nodiscard]] double width() const noexcept;                     ///< of all columns
     [[nodiscard]] const std::vector<double>& widths() const noexcept { return widths_; }
     [[nodiscard]] xlsx::Sheet& sheet() noexcept { return *sheet_; }
     [[nodiscard]] xlsx::StyleId style(const xlsx::Style& style) { return book_->style(style); }

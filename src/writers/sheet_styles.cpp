@@ -6,7 +6,8 @@
 namespace spanledger {
 
 std::string issue_mark(const Practice& practice) {
-    return practice.revision.empty() ? practice.number : fmt::format("{}, revision {}", practice.number, practice.revision);
+    return practice.revision.empty() ? practice.number
+                                     : fmt::format("{}, revision {}", practice.number, practice.revision);
 }
 
 xlsx::PageSetUp page_set_up(const Practice& practice) {

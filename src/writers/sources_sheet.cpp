@@ -15,10 +15,11 @@ std::string mark(const SourceLine& line) {
 void write_sources(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue) {
     SheetPen pen(book, sheet, {84.0, 116.0, 244.0, 236.0, 90.0});
     pen.paragraph(0, "Sources of the values", sheet_title, pen.width());
-    pen.paragraph(0,
-                  "Every catalogue row and parameter that these tables use. Seen: the value was seen in the source. From "
-                  "memory: it is recalled, and must be confirmed against the source before the tables are relied on.",
-                  running_text, pen.width());
+    pen.paragraph(
+        0,
+        "Every catalogue row and parameter that these tables use. Seen: the value was seen in the source. From "
+        "memory: it is recalled, and must be confirmed against the source before the tables are relied on.",
+        running_text, pen.width());
     pen.gap(4.0);
     const std::uint32_t head = pen.next_row();
     pen.row({"Kind", "Item", "Value, with unit", "Source", "Seen or recalled"}, list_head);

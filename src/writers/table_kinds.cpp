@@ -33,7 +33,8 @@ constexpr std::array kinds{
               .heading = "Utilisation",
               .unit = "",
               .record_unit = "-",
-              .about = "the largest utilisation of any limit at the clear span of the column, rounded up; a pure number",
+              .about =
+                  "the largest utilisation of any limit at the clear span of the column, rounded up; a pure number",
               .no_value = "no value"},
     KindWords{.kind = TableKind::smallest_section,
               .name = "smallest section",
@@ -47,7 +48,9 @@ constexpr std::array kinds{
 
 } // namespace
 
-const KindWords& words_of(TableKind kind) noexcept { return kinds[static_cast<std::size_t>(kind)]; }
+const KindWords& words_of(TableKind kind) noexcept {
+    return kinds[static_cast<std::size_t>(kind)];
+}
 
 int decimals_of(const KindWords& words, const SearchRange& search) noexcept {
     return words.step_decides ? decimals_of_step(search.step) : words.decimals;

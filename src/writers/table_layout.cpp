@@ -6,6 +6,7 @@
 #include <fmt/format.h>
 
 #include <algorithm>
+#include <array>
 #include <numeric>
 
 namespace spanledger {
@@ -17,20 +18,48 @@ constexpr double least_cell_width = 46.0;
 constexpr Font cell_font{10.0, false};
 constexpr Font head_font{9.0, true};
 
-double cell_width(const TableResult& table, const SearchRange& search) {
-    const KindWords& kind = words_of(table.kind);
-    double widest = text_width("0000 mm", head_font);
-    double greatest = 0.0;
-    for (const Cell& cell : table.cells) {
-        if (kind.shows_text && cell.value) widest = std::max(widest, text_width(cell.text + " M", cell_font));
-        if (cell.value) greatest = std::max(greatest, *cell.value * kind.scale);
+/// Gathers the facts in one pass: tables may be larger than any cache.
+class FactGatherer {
+public:
+    explicit FactGatherer(const TableResult& table) : kind_(&words_of(table.kind)) {
+        for (const LimitNote& note : table.limits) {
+            if (note.status == LimitStatus::checked) shown_[index_of(note.limit)] = true;
+        }
+        for (const Cell& cell : table.cells) {
+            if (cell.value) {
+                add_value(cell);
+            } else if (std::find(facts_.reasons.begin(), facts_.reasons.end(), cell.reason) == facts_.reasons.end()) {
+                facts_.reasons.push_back(cell.reason);
+            }
+        }
     }
-    if (!kind.shows_text) {
-        const std::string longest = fmt::format("{:.{}f} M", greatest, decimals_of(kind, search));
-        widest = std::max(widest, text_width(longest, cell_font));
+
+    TableFacts facts(const SearchRange& search) {
+        double widest = std::max(text_width("0000 mm", head_font), widest_text_);
+        if (!kind_->shows_text) {
+            const std::string longest = fmt::format("{:.{}f} M", greatest_ * kind_->scale, decimals_of(*kind_, search));
+            widest = std::max(widest, text_width(longest, cell_font));
+        }
+        facts_.cell_width = std::max(least_cell_width, widest + cell_padding);
+        for (const LimitDefinition& definition : limit_definitions) {
+            if (shown_[index_of(definition.limit)]) facts_.limits.push_back(definition.limit);
+        }
+        return std::move(facts_);
     }
-    return std::max(least_cell_width, widest + cell_padding);
-}
+
+private:
+    void add_value(const Cell& cell) {
+        if (kind_->shows_text) widest_text_ = std::max(widest_text_, text_width(cell.text + " M", cell_font));
+        greatest_ = std::max(greatest_, *cell.value);
+        if (cell.governing) shown_[index_of(*cell.governing)] = true;
+    }
+
+    const KindWords* kind_;
+    TableFacts facts_;
+    std::array<bool, limit_count> shown_{};
+    double widest_text_ = 0.0;
+    double greatest_ = 0.0;
+};
 
 double first_head_width(const TableResult& table) {
     double widest = text_width("Spacing", head_font);
@@ -56,11 +85,16 @@ std::vector<LoadGroup> groups_of(const TableResult& table, std::size_t first, st
 
 } // namespace
 
+TableFacts facts_of(const TableResult& table, const SearchRange& search) {
+    return FactGatherer(table).facts(search);
+}
+
 std::vector<TablePart> parts_of(const TableResult& table, std::size_t number, const SearchRange& search) {
+    const auto facts = std::make_shared<const TableFacts>(facts_of(table, search));
     const double room = widest_sheet - first_head_width(table) - second_head_width(table);
-    const auto most = std::max<std::size_t>(1, static_cast<std::size_t>(room / cell_width(table, search)));
+    const auto most = std::max<std::size_t>(1, static_cast<std::size_t>(room / facts->cell_width));
     std::vector<TablePart> parts;
-    TablePart part{.table = &table, .number = number};
+    TablePart part{.table = &table, .facts = facts, .number = number};
     for (const LoadGroup& group : groups_of(table, 0, table.columns.size())) {
         const bool fits_with_others = group.last - part.first <= most;
         if (!fits_with_others && part.last > part.first) {
@@ -82,31 +116,23 @@ std::vector<TablePart> parts_of(const TableResult& table, std::size_t number, co
     return parts;
 }
 
-TableLayout layout_of(const TablePart& part, const SearchRange& search) {
+TableLayout layout_of(const TablePart& part) {
     TableLayout layout;
     layout.groups = groups_of(*part.table, part.first, part.last);
     layout.cell_columns = part.last - part.first;
     layout.widths = {first_head_width(*part.table), second_head_width(*part.table)};
-    const double width = cell_width(*part.table, search);
+    const double width = part.facts->cell_width;
     for (const LoadGroup& group : layout.groups) {
         const auto columns = static_cast<double>(group.last - group.first);
         // A load class's name has two lines over its columns; longer ones take more.
         constexpr double widest_cell = 90.0;
         const double name = (text_width(group.load, head_font) / 2.0 + 3.0 * cell_padding) / columns;
-        layout.widths.insert(layout.widths.end(), group.last - group.first, std::clamp(name, width, std::max(width, widest_cell)));
+        layout.widths.insert(layout.widths.end(), group.last - group.first,
+                             std::clamp(name, width, std::max(width, widest_cell)));
     }
     double total = std::accumulate(layout.widths.begin(), layout.widths.end(), 0.0);
     for (; total + least_cell_width <= page_width; total += least_cell_width) layout.widths.push_back(least_cell_width);
     return layout;
-}
-
-std::vector<std::string> reasons_without_value(const TableResult& table) {
-    std::vector<std::string> reasons;
-    for (const Cell& cell : table.cells) {
-        if (cell.value || std::find(reasons.begin(), reasons.end(), cell.reason) != reasons.end()) continue;
-        reasons.push_back(cell.reason);
-    }
-    return reasons;
 }
 
 bool sections_are_sizes(const TableResult& table) {

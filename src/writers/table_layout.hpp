@@ -25,10 +25,7 @@ struct TableLayout {
 
 inline constexpr std::uint32_t head_columns = 2;
 
-[[nodiscard]] TableLayout layout_of(const TablePart& part, const SearchRange& search);
-
-/// Why cells of the table have no value: each reason once, in the order met. Cells refer to them by number.
-[[nodiscard]] std::vector<std::string> reasons_without_value(const TableResult& table);
+[[nodiscard]] TableLayout layout_of(const TablePart& part);
 
 /// Words over the second column of row heads, with the unit.
 [[nodiscard]] std::string second_head(const TableResult& table);

@@ -22,22 +22,6 @@ const xlsx::Style row_head_style{.size = 10.0, .borders = {.bottom = Line::fine}
 /// A head taller than this repeats only its legend and column heads on later pages, and does not stay on the screen.
 constexpr double tallest_repeated_head = 240.0;
 
-/// The limits whose letters may stand in the table: checked, or in a cell all the same.
-std::vector<Limit> limits_shown(const TableResult& table) {
-    std::array<bool, limit_count> shown{};
-    for (const LimitNote& note : table.limits) {
-        if (note.status == LimitStatus::checked) shown[index_of(note.limit)] = true;
-    }
-    for (const Cell& cell : table.cells) {
-        if (cell.value && cell.governing) shown[index_of(*cell.governing)] = true;
-    }
-    std::vector<Limit> limits;
-    for (const LimitDefinition& definition : limit_definitions) {
-        if (shown[index_of(definition.limit)]) limits.push_back(definition.limit);
-    }
-    return limits;
-}
-
 /// The styles of a sheet's cells, found once: one per limit (and one for none), at the start of a group or within.
 class CellStyles {
 public:
@@ -64,8 +48,7 @@ class TableSheet {
 public:
     TableSheet(xlsx::Book& book, xlsx::Sheet& sheet, const Issue& issue, const TablePart& part)
         : issue_(&issue), part_(&part), table_(part.table), kind_(&words_of(part.table->kind)),
-          layout_(layout_of(part, issue.brief.search)), pen_(book, sheet, layout_.widths),
-          reasons_(reasons_without_value(*part.table)) {}
+          layout_(layout_of(part)), pen_(book, sheet, layout_.widths), reasons_(part.facts->reasons) {}
 
     void write() {
         titles();
@@ -102,15 +85,16 @@ private:
         std::string words(kind_->heading);
         if (!kind_->unit.empty()) words += fmt::format(", in {}", kind_->unit);
         pen_.paragraph(0, words, group_heading, pen_.width());
-        pen_.paragraph(0, fmt::format("A cell: {}. Its letter and fill name the limit that governs.", about()), note_style,
-                       pen_.width());
+        pen_.paragraph(0, fmt::format("A cell: {}. Its letter and fill name the limit that governs.", about()),
+                       note_style, pen_.width());
         legend_entries();
         std::string without_value;
         for (std::size_t i = 0; i < reasons_.size(); ++i) {
             without_value += fmt::format("    {} {})  {}", no_limit_mark, i + 1, reasons_[i]);
         }
         if (!reasons_.empty()) {
-            pen_.paragraph(0, fmt::format("Where there is {}:{}", kind_->no_value, without_value), note_style, pen_.width());
+            pen_.paragraph(0, fmt::format("Where there is {}:{}", kind_->no_value, without_value), note_style,
+                           pen_.width());
         }
         pen_.gap(4.0);
     }
@@ -122,7 +106,7 @@ private:
     void legend_entries() {
         std::vector<std::pair<std::optional<Limit>, std::string>> entries;
         double room = 0.0;
-        for (const Limit limit : limits_shown(*table_)) entries.emplace_back(limit, definition_of(limit).about);
+        for (const Limit limit : part_->facts->limits) entries.emplace_back(limit, definition_of(limit).about);
         if (!kind_->shows_text) entries.emplace_back(std::nullopt, "beside a number: no limit reached");
         for (const auto& entry : entries) room = std::max(room, text_width(entry.second, font_of(note_style)));
         const auto slots = legend_slots(layout_.widths, room + 2.0 * cell_padding);
@@ -160,10 +144,12 @@ private:
 
     void column_heads() {
         load_names();
-        head_numbers("Spacing, c/c", [](const ColumnHead& column) { return column.spacing; }, "0.##\" mm\"", Line::none);
+        head_numbers(
+            "Spacing, c/c", [](const ColumnHead& column) { return column.spacing; }, "0.##\" mm\"", Line::none);
         if (!table_->columns.empty() && table_->columns.front().span) {
-            head_numbers("Clear span", [](const ColumnHead& column) { return *column.span / 1000.0; }, "0.00#\" m\"",
-                         Line::none);
+            head_numbers(
+                "Clear span", [](const ColumnHead& column) { return *column.span / 1000.0; }, "0.00#\" m\"",
+                Line::none);
         }
         units();
     }
@@ -220,7 +206,9 @@ private:
         pen_.sheet().text(pen_.at(1), second_head(*table_), pen_.style(style));
         style.align = xlsx::Align::centre;
         style.bold = false;
-        const std::string unit = kind_->shows_text ? "section" : kind_->unit.empty() ? "ratio" : std::string(kind_->unit);
+        const std::string unit = kind_->shows_text     ? "section"
+                                 : kind_->unit.empty() ? "ratio"
+                                                       : std::string(kind_->unit);
         for (std::size_t c = part_->first; c < part_->last; ++c) {
             pen_.sheet().text(pen_.at(column_of(c)), unit, head_id(style, starts_group(c)));
         }
@@ -228,7 +216,8 @@ private:
     }
 
     void rows() {
-        const std::string format = kind_->shows_text ? "@" : number_format_of(decimals_of(*kind_, issue_->brief.search));
+        const std::string format =
+            kind_->shows_text ? "@" : number_format_of(decimals_of(*kind_, issue_->brief.search));
         const CellStyles styles(pen_, format);
         xlsx::Style without = cell_style(std::nullopt, format);
         without.number_format.clear();
@@ -302,7 +291,7 @@ private:
     const KindWords* kind_;
     TableLayout layout_;
     SheetPen pen_;
-    std::vector<std::string> reasons_;
+    const std::vector<std::string>& reasons_;
 };
 
 } // namespace

@@ -8,7 +8,9 @@
 namespace spanledger {
 namespace {
 
-bool one_of(std::string_view set, char c) { return set.find(c) != std::string_view::npos; }
+bool one_of(std::string_view set, char c) {
+    return set.find(c) != std::string_view::npos;
+}
 
 /// Width of the character that begins with this byte, in parts of the font's size. Rounded up within each kind.
 double character_width(char c) {

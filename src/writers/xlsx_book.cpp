@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: MIT
 #include "spanledger/writers/xlsx_book.hpp"
 
+#include "xlsx_state.hpp"
+
 #include "utf8_bytes.hpp"
 
 #include <fmt/format.h>
@@ -22,7 +24,8 @@ constexpr const char* font_name = "Arial";
 constexpr double text_size = 9.0;
 constexpr std::uint8_t a4 = 9;
 
-/// Seconds since 1970 of a day at midnight UTC; of 1 January 1980, where zip archives begin, if the text is no later day.
+/// Seconds since 1970 of a day at midnight UTC; of 1 January 1980, where zip archives begin, if the text is no later
+/// day.
 std::time_t created_at(const std::string& date) {
     using namespace std::chrono;
     constexpr sys_days earliest = year{1980} / January / 1;
@@ -132,39 +135,22 @@ std::string reference_to(const std::string& sheet) {
     return fmt::format("internal:'{}'!A1", quoted);
 }
 
-lxw_worksheet* worksheet(void* handle) { return static_cast<lxw_worksheet*>(handle); }
-lxw_row_t row_of(At at) { return at.row; }
-lxw_col_t column_of(At at) { return static_cast<lxw_col_t>(at.column); }
+lxw_worksheet* worksheet(void* handle) {
+    return static_cast<lxw_worksheet*>(handle);
+}
+lxw_row_t row_of(At at) {
+    return at.row;
+}
+lxw_col_t column_of(At at) {
+    return static_cast<lxw_col_t>(at.column);
+}
 
 } // namespace
 
-struct BookState {
-    std::string file;
-    std::string folder;
-    lxw_workbook* workbook = nullptr;
-    std::deque<Sheet> sheets;
-    std::vector<Style> styles;
-    std::vector<lxw_format*> formats;
-    WriteResult problem;
-
-    ~BookState() {
-        if (workbook != nullptr) lxw_workbook_free(workbook);
-    }
-
-    /// Every return code of the library comes by here.
-    void check(lxw_error code, std::string_view doing) {
-        if (code != LXW_NO_ERROR) report(fmt::format("{}: {}", doing, lxw_strerror(code)));
-    }
-
-    void report(std::string reason) {
-        if (!problem) problem = WriteError{file, std::move(reason)};
-    }
-};
-
 void Sheet::text(At at, const std::string& words, StyleId style) {
-    book_->check(worksheet_write_string(worksheet(handle_), row_of(at), column_of(at), words.c_str(),
-                                        book_->formats[style]),
-                 "a text");
+    book_->check(
+        worksheet_write_string(worksheet(handle_), row_of(at), column_of(at), words.c_str(), book_->formats[style]),
+        "a text");
 }
 
 void Sheet::number(At at, double value, StyleId style) {
@@ -267,8 +253,9 @@ Sheet& Book::add_sheet(const std::string& name) {
 
 void Book::property(const std::string& name, const std::string& value) {
     constexpr std::size_t longest = 255;
-    state_->check(workbook_set_custom_property_string(state_->workbook, name.c_str(), shortened(value, longest).c_str()),
-                  "the property " + name);
+    state_->check(
+        workbook_set_custom_property_string(state_->workbook, name.c_str(), shortened(value, longest).c_str()),
+        "the property " + name);
 }
 
 WriteResult Book::close() {

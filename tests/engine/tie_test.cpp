@@ -12,7 +12,8 @@ namespace {
 
 std::array<std::optional<double>, limit_count> spans(std::initializer_list<std::pair<Limit, double>> given) {
     std::array<std::optional<double>, limit_count> left;
-    for (const auto& [limit, span] : given) left[index_of(limit)] = span;
+    for (const auto& [limit, span] : given)
+        left[index_of(limit)] = span;
     return left;
 }
 
@@ -33,10 +34,18 @@ TEST_CASE("spans within 1e-9 relative are equal, further apart the smaller one g
 }
 
 TEST_CASE("every limit in the order of the tie") {
-    const std::array order{Limit::bending, Limit::shear, Limit::bending_with_shear, Limit::bearing,
-                           Limit::lateral_buckling, Limit::variable_deflection, Limit::instantaneous_deflection,
-                           Limit::final_deflection, Limit::frequency, Limit::unit_load_deflection,
-                           Limit::velocity_response, Limit::stock_length};
+    const std::array order{Limit::bending,
+                           Limit::shear,
+                           Limit::bending_with_shear,
+                           Limit::bearing,
+                           Limit::lateral_buckling,
+                           Limit::variable_deflection,
+                           Limit::instantaneous_deflection,
+                           Limit::final_deflection,
+                           Limit::frequency,
+                           Limit::unit_load_deflection,
+                           Limit::velocity_response,
+                           Limit::stock_length};
     REQUIRE(order.size() == limit_count);
     for (std::size_t i = 0; i + 1 < order.size(); ++i) {
         const Ranking r = rank_limits(spans({{order[i], 3000.0}, {order[i + 1], 3000.0}}));

@@ -174,9 +174,9 @@ TEST_CASE("Wrong rows of a practice's channels are reported", "[cold-formed]") {
     };
     const TemporaryFolder folder;
     for (const Wrong& wrong : {Wrong{"own,220,72,66,22,19,3,supplier", "out-of-range"},
-                               Wrong{"own,220,72,66,120,1.9,3,supplier", "contradiction"},
+                               Wrong{"own,220,72,66,10,4,7,supplier", "contradiction"},
                                Wrong{"own,220,72,66,22,1.9,3,", "missing-source"},
-                               Wrong{"own,220,72,66,22,nan,3,supplier", "not-finite"}}) {
+                               Wrong{"own,220,72,66,22,nan,3,supplier", "bad-number"}}) {
         folder.write("sections.csv",
                      std::string("series,h_mm,b_1_mm,b_2_mm,c_mm,t_nom_mm,r_mm,source\n") + wrong.row + "\n");
         Diagnostics diagnostics;

@@ -9,8 +9,8 @@
 
 using namespace spanledger;
 
-// The powers of the span that elementary beam theory gives each limit of a joist under uniform load (common practice, no
-// source): M ~ L2, V ~ L, w ~ L4, f ~ 1/L2, so that w/(L/n) ~ L3.
+// The powers of the span that elementary beam theory gives each limit of a joist under uniform load (common practice,
+// no source): M ~ L2, V ~ L, w ~ L4, f ~ 1/L2, so that w/(L/n) ~ L3.
 
 namespace {
 
@@ -32,7 +32,8 @@ independent::Case uniform_floor() {
     independent::Case c;
     c.loads.g = 0.0005;
     c.loads.q = 0.0015;
-    for (auto& limit : c.deflection) limit = independent::DeflectionLimit{250.0, std::nullopt};
+    for (auto& limit : c.deflection)
+        limit = independent::DeflectionLimit{250.0, std::nullopt};
     c.vibration = independent::Vibration::recommended;
     c.stock = 6000;
     return c;
@@ -99,7 +100,8 @@ int check_piece(const Joist& joist, Limit limit, const Piece& piece, TwoSpans sp
     int known = 0;
     for (std::size_t part = 0; part < piece.shapes.size(); ++part) {
         const CheckShape& shape = piece.shapes[part];
-        if (!shape.known || utilisation(at_a[part]) == 0.0) continue;
+        if (!shape.known || utilisation(at_a[part]) == 0.0)
+            continue;
         ++known;
         const double growth = utilisation(at_b[part]) / utilisation(at_a[part]);
         CHECK(growth >= std::pow(spans.b / spans.a, shape.order_low) * (1.0 - 1e-11));

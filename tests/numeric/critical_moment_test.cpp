@@ -30,7 +30,9 @@ const Diagram constant_moment{[](double) { return 1.0; }};
 const Diagram uniform_load{[](double s) { return 4.0 * s * (1.0 - s); }, 8.0, 0.0};
 const Diagram force_at_midspan{[](double s) { return s < 0.5 ? 2.0 * s : 2.0 * (1.0 - s); }, 0.0, 4.0};
 
-double wave(std::size_t n, double s) { return std::sin(static_cast<double>(n + 1) * pi * s); }
+double wave(std::size_t n, double s) {
+    return std::sin(static_cast<double>(n + 1) * pi * s);
+}
 
 /// Integral over x/L of M2 sin sin; the diagram may have a corner at mid-span.
 numeric::Matrix coupling(const Diagram& diagram) {
@@ -49,10 +51,12 @@ numeric::Matrix coupling(const Diagram& diagram) {
 
 bool positive_definite(numeric::Matrix A) {
     for (std::size_t k = 0; k < A.size(); ++k) {
-        if (A[k][k] <= 0.0) return false;
+        if (A[k][k] <= 0.0)
+            return false;
         for (std::size_t i = k + 1; i < A.size(); ++i) {
             const double factor = A[i][k] / A[k][k];
-            for (std::size_t j = k; j < A.size(); ++j) A[i][j] -= factor * A[k][j];
+            for (std::size_t j = k; j < A.size(); ++j)
+                A[i][j] -= factor * A[k][j];
         }
     }
     return true;
@@ -141,22 +145,23 @@ TEST_CASE("M_cr under a force at mid-span is the lowest eigenvalue within 1.2 %,
     for (const Case& c : cases()) {
         const double numerical = numerical_critical_moment(c.joist, force_at_midspan);
         INFO("h " << c.h << ", L " << c.joist.L << ", z_g " << c.joist.z_g);
-        if (c.joist.z_g == 0.0) CHECK(force(c.joist) == Approx(numerical).epsilon(0.012));
-        if (c.joist.z_g > 0.0) CHECK(force(c.joist) < numerical);
-        if (c.joist.z_g > 0.0) CHECK(force(c.joist) > 0.93 * numerical);
+        if (c.joist.z_g == 0.0)
+            CHECK(force(c.joist) == Approx(numerical).epsilon(0.012));
+        if (c.joist.z_g > 0.0)
+            CHECK(force(c.joist) < numerical);
+        if (c.joist.z_g > 0.0)
+            CHECK(force(c.joist) > 0.93 * numerical);
     }
 }
 
 TEST_CASE("the smaller M_cr of both forms is safe for any mix of uniform load and force, wherever they act") {
     for (const Case& c : cases()) {
         for (const double share : {0.0, 0.25, 0.5, 0.75, 1.0}) {
-            const Diagram mixed{[=](double s) {
-                                    return (1.0 - share) * uniform_load.moment(s) + share * force_at_midspan.moment(s);
-                                },
-                                (1.0 - share) * uniform_load.q, share * force_at_midspan.F};
+            const Diagram mixed{
+                [=](double s) { return (1.0 - share) * uniform_load.moment(s) + share * force_at_midspan.moment(s); },
+                (1.0 - share) * uniform_load.q, share * force_at_midspan.F};
             INFO("h " << c.h << ", L " << c.joist.L << ", z_g " << c.joist.z_g << ", share of the force " << share);
-            CHECK(std::min(uniform(c.joist), force(c.joist)) <=
-                  numerical_critical_moment(c.joist, mixed) * 1.001);
+            CHECK(std::min(uniform(c.joist), force(c.joist)) <= numerical_critical_moment(c.joist, mixed) * 1.001);
         }
     }
 }

@@ -31,7 +31,8 @@ Example beam_theory() {
     Example e;
     e.title = "Beam theory";
     e.source = "common practice, no source";
-    e.inputs = "q = 2 N/mm, F = 3000 N, L = 4000 mm, b x h = 60 x 200 mm, E = 10000 MPa; printed values worked out by hand";
+    e.inputs =
+        "q = 2 N/mm, F = 3000 N, L = 4000 mm, b x h = 60 x 200 mm, E = 10000 MPa; printed values worked out by hand";
     e.rows = {
         fact("A = bh", "12000", rectangle::area(60.0, 200.0), "mm2"),
         fact("W = bh2/6", "400000", rectangle::section_modulus(60.0, 200.0), "mm3"),
@@ -55,4 +56,6 @@ Example beam_theory() {
 
 } // namespace published
 
-TEST_CASE("beam theory: facts of the trade") { published::check(published::beam_theory()); }
+TEST_CASE("beam theory: facts of the trade") {
+    published::check(published::beam_theory());
+}

@@ -47,4 +47,6 @@ Example din_floor() {
 
 } // namespace published
 
-TEST_CASE("DIN 1052: timber joist floor") { published::check(published::din_floor()); }
+TEST_CASE("DIN 1052: timber joist floor") {
+    published::check(published::din_floor());
+}

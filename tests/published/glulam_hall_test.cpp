@@ -68,4 +68,6 @@ Example glulam_hall() {
 
 } // namespace published
 
-TEST_CASE("Structural Design Essentials: glulam main beam of a hall") { published::check(published::glulam_hall()); }
+TEST_CASE("Structural Design Essentials: glulam main beam of a hall") {
+    published::check(published::glulam_hall());
+}

@@ -88,9 +88,10 @@ Example lvl_floor() {
     e.title = "LVL 48 P joist floor";
     e.source = "LVL Handbook Europe, Federation of the Finnish Woodworking Industries, 2025, chapter 9.1, pages 181 to "
                "185 (page 183 not seen)";
-    e.inputs = "span 4500 mm, floor 5000 mm wide, joists 45 x 240 mm at 400 mm, edgewise f_m 44, f_v 4.2, f_c_90 6, E "
-               "13800, G 600 MPa, size exponent 0.15, k_mod 0.8, gamma_M 1.2; Finnish gamma_G 1.15 and contact of 15 mm "
-               "beyond the support given as inputs; (EI)_b 3110 Nm2/m as printed";
+    e.inputs =
+        "span 4500 mm, floor 5000 mm wide, joists 45 x 240 mm at 400 mm, edgewise f_m 44, f_v 4.2, f_c_90 6, E "
+        "13800, G 600 MPa, size exponent 0.15, k_mod 0.8, gamma_M 1.2; Finnish gamma_G 1.15 and contact of 15 mm "
+        "beyond the support given as inputs; (EI)_b 3110 Nm2/m as printed";
     for (const auto& part : {section(), strength(), vibration()}) {
         e.rows.insert(e.rows.end(), part.begin(), part.end());
     }
@@ -108,4 +109,6 @@ Example lvl_floor() {
 
 } // namespace published
 
-TEST_CASE("LVL Handbook Europe 9.1: LVL 48 P joist floor") { published::check(published::lvl_floor()); }
+TEST_CASE("LVL Handbook Europe 9.1: LVL 48 P joist floor") {
+    published::check(published::lvl_floor());
+}

@@ -136,8 +136,8 @@ Example parameter_table() {
                "Handbook Europe 2025 (LVL, vibration)";
     e.inputs = "parameter set and key of the catalogue";
     for (const Value& v : values) {
-        e.rows.push_back({v.mark, fmt::format("{}: {}", v.set, v.key), v.printed, parameter(catalogue(v.set), v.key),
-                          v.unit});
+        e.rows.push_back(
+            {v.mark, fmt::format("{}: {}", v.set, v.key), v.printed, parameter(catalogue(v.set), v.key), v.unit});
     }
     e.not_covered = {
         {"LVL size factor capped at 1.1 (LVL Handbook, page 122)", "EN 1995-1-1 3.4(3) has 1.2 (from memory)"},
@@ -148,7 +148,9 @@ Example parameter_table() {
 
 } // namespace
 
-std::vector<Example> timber_parameters() { return {k_mod_table(), k_def_table(), parameter_table()}; }
+std::vector<Example> timber_parameters() {
+    return {k_mod_table(), k_def_table(), parameter_table()};
+}
 
 namespace {
 
@@ -207,9 +209,11 @@ std::vector<Example> psi_factors() {
 } // namespace published
 
 TEST_CASE("catalogue: k_mod, k_def and parameters as quoted") {
-    for (const auto& table : published::timber_parameters()) published::check(table);
+    for (const auto& table : published::timber_parameters())
+        published::check(table);
 }
 
 TEST_CASE("catalogue: psi factors as quoted") {
-    for (const auto& table : published::psi_factors()) published::check(table);
+    for (const auto& table : published::psi_factors())
+        published::check(table);
 }

@@ -14,9 +14,12 @@ namespace {
 
 std::string_view words(Mark mark) {
     switch (mark) {
-    case Mark::seen: return "seen";
-    case Mark::from_memory: return "from memory";
-    case Mark::common_practice: return "common practice, no source";
+    case Mark::seen:
+        return "seen";
+    case Mark::from_memory:
+        return "from memory";
+    case Mark::common_practice:
+        return "common practice, no source";
     }
     return {};
 }
@@ -34,14 +37,16 @@ Digits digits_of(std::string_view printed) {
     }
     const auto mantissa = printed.substr(0, e);
     const auto point = mantissa.find('.');
-    if (point != std::string_view::npos) digits.decimals = static_cast<int>(mantissa.size() - point - 1);
+    if (point != std::string_view::npos)
+        digits.decimals = static_cast<int>(mantissa.size() - point - 1);
     return digits;
 }
 
 /// Ours with two digits more than the source prints.
 std::string shown(const Row& row, double value) {
     const Digits digits = digits_of(row.printed);
-    if (row.printed.find('e') != std::string::npos) return fmt::format("{:.{}e}", value, digits.decimals + 2);
+    if (row.printed.find('e') != std::string::npos)
+        return fmt::format("{:.{}e}", value, digits.decimals + 2);
     return fmt::format("{:.{}f}", value, digits.decimals + 2);
 }
 
@@ -58,11 +63,12 @@ std::string line_of(const Row& row) {
 }
 
 std::string section_of(const Example& example) {
-    std::string text = fmt::format("\n## {}\n\nSource: {}.\n\nInputs: {}.\n\n", example.title, example.source,
-                                   example.inputs);
+    std::string text =
+        fmt::format("\n## {}\n\nSource: {}.\n\nInputs: {}.\n\n", example.title, example.source, example.inputs);
     text += "| quantity | printed | ours | unit | difference | printed value | remark |\n"
             "|---|---:|---:|---|---:|---|---|\n";
-    for (const Row& row : example.rows) text += line_of(row);
+    for (const Row& row : example.rows)
+        text += line_of(row);
     return text;
 }
 
@@ -80,7 +86,8 @@ std::string not_covered_section(const std::vector<Example>& examples) {
 std::string summary(const std::vector<Example>& examples) {
     std::array<std::size_t, 3> count{};
     for (const Example& example : examples) {
-        for (const Row& row : example.rows) ++count[static_cast<std::size_t>(row.mark)];
+        for (const Row& row : example.rows)
+            ++count[static_cast<std::size_t>(row.mark)];
     }
     return fmt::format("{} values: {} seen in their source, {} from memory, {} common practice without a source. Each "
                        "agrees with ours within half a unit of the last printed digit, unless its remark says why "
@@ -90,7 +97,9 @@ std::string summary(const std::vector<Example>& examples) {
 
 } // namespace
 
-double printed_value(const Row& row) { return std::stod(row.printed); }
+double printed_value(const Row& row) {
+    return std::stod(row.printed);
+}
 
 double tolerance(const Row& row) {
     const Digits digits = digits_of(row.printed);
@@ -106,9 +115,9 @@ bool agrees(const Row& row) {
 void check(const Example& example) {
     for (const Row& row : example.rows) {
         INFO(example.source << "\n"
-                            << row.quantity << ": printed " << row.printed << " " << row.unit << " ("
-                            << words(row.mark) << "), ours " << shown(row, row.ours) << ", tolerance "
-                            << tolerance(row) << ". " << row.remark);
+                            << row.quantity << ": printed " << row.printed << " " << row.unit << " (" << words(row.mark)
+                            << "), ours " << shown(row, row.ours) << ", tolerance " << tolerance(row) << ". "
+                            << row.remark);
         CHECK(agrees(row));
         CHECK((row.units_off == 0.5 || !row.remark.empty()));
     }
@@ -118,17 +127,20 @@ std::string guide(const std::vector<Example>& examples) {
     std::string text = "# Validation guide\n\nPublished results, ours, and the difference. Made by the test suite: "
                        "every row below is checked there.\n\n";
     text += summary(examples);
-    for (const Example& example : examples) text += section_of(example);
+    for (const Example& example : examples)
+        text += section_of(example);
     return text + not_covered_section(examples);
 }
 
 namespace {
 
 std::vector<Example> all_examples() {
-    std::vector<Example> all{beam_theory(), combination_factors(), lvl_floor(), din_floor(), glulam_hall(),
+    std::vector<Example> all{beam_theory(),      combination_factors(),       lvl_floor(), din_floor(), glulam_hall(),
                              steel_floor_beam(), lateral_buckling_of_a_beam()};
-    for (auto& table : timber_parameters()) all.push_back(std::move(table));
-    for (auto& table : psi_factors()) all.push_back(std::move(table));
+    for (auto& table : timber_parameters())
+        all.push_back(std::move(table));
+    for (auto& table : psi_factors())
+        all.push_back(std::move(table));
     return all;
 }
 

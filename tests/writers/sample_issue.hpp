@@ -6,8 +6,8 @@
 #include <cmath>
 #include <string>
 
-// An issue made up by hand for the writers: no engine has seen its numbers. Two tables of spans with every letter, cells
-// without a span, cells that no limit ends, nasty names; and a table of each other kind.
+// An issue made up by hand for the writers: no engine has seen its numbers. Two tables of spans with every letter,
+// cells without a span, cells that no limit ends, nasty names; and a table of each other kind.
 
 namespace sample {
 
@@ -45,7 +45,8 @@ inline Brief brief() {
     brief.deck = {"22 mm board (invented)", 600.0, 1.95e9};
     brief.members = {{"C24, 47 mm", "C24", "UK 47", {}, 1, false, {4800.0, 7200.0}, {}},
                      {"+plies [2] of */?: a name beyond 31 characters", "GL24h", "", {"2/47x220"}, 2, true, {}, {}}};
-    brief.tables = {{"Floor joists", TableKind::permissible_span, {"C24, 47 mm"}, {400, 450, 600}, {"Dwelling, G 0.25"}, {}}};
+    brief.tables = {
+        {"Floor joists", TableKind::permissible_span, {"C24, 47 mm"}, {400, 450, 600}, {"Dwelling, G 0.25"}, {}}};
     return brief;
 }
 
@@ -80,7 +81,8 @@ inline Cell unlimited() {
     cell.utilisation = 0.25;
     cell.permissible = 30000.0;
     cell.reason = "no limit reached";
-    for (LimitOutcome& outcome : cell.limits) outcome.kind = LimitOutcome::Kind::never_reached;
+    for (LimitOutcome& outcome : cell.limits)
+        outcome.kind = LimitOutcome::Kind::never_reached;
     return cell;
 }
 
@@ -104,11 +106,13 @@ inline TableResult span_table(std::string name, std::string members, std::string
                         "Dwelling, G 0.25: Qk 2 kN, 1 of it on one joist, in strength only.",
                         "Dwelling, G 0.50: Qk 2 kN, 1 of it on one joist, in strength only."};
     for (const LoadClass& one : brief().loads) {
-        for (const double spacing : {400.0, 450.0, 600.0}) table.columns.push_back({one.name, spacing, {}});
+        for (const double spacing : {400.0, 450.0, 600.0})
+            table.columns.push_back({one.name, spacing, {}});
     }
     for (std::size_t row = 0; row < rows; ++row) {
         const double depth = 97.0 + 25.0 * static_cast<double>(row);
-        table.rows.push_back({row % 3 == 2 ? "-C16" : "C24", "47x" + std::to_string(static_cast<int>(depth)), depth, {}});
+        table.rows.push_back(
+            {row % 3 == 2 ? "-C16" : "C24", "47x" + std::to_string(static_cast<int>(depth)), depth, {}});
         for (std::size_t column = 0; column < table.columns.size(); ++column) {
             const std::size_t n = row * table.columns.size() + column;
             if (n % 23 == 5) {
@@ -116,7 +120,8 @@ inline TableResult span_table(std::string name, std::string members, std::string
             } else if (n % 29 == 7) {
                 table.cells.push_back(unlimited());
             } else {
-                const double permissible = 1503.0 + 211.37 * static_cast<double>(row) - 37.11 * static_cast<double>(column);
+                const double permissible =
+                    1503.0 + 211.37 * static_cast<double>(row) - 37.11 * static_cast<double>(column);
                 table.cells.push_back(spanning(static_cast<Limit>(n % limit_count), permissible));
             }
         }
@@ -129,9 +134,11 @@ inline TableResult other_table(TableKind kind, double unit) {
     TableResult table = span_table("@Loads and ratios", "C24, 47 mm", "solid timber", 0);
     table.kind = kind;
     table.columns.clear();
-    for (const double span : {3000.0, 3600.0, 4200.0}) table.columns.push_back({"Dwelling, G 0.25", 400.0, span});
+    for (const double span : {3000.0, 3600.0, 4200.0})
+        table.columns.push_back({"Dwelling, G 0.25", 400.0, span});
     for (std::size_t row = 0; row < 4; ++row) {
-        table.rows.push_back({"C24", "47x" + std::to_string(147 + 25 * row), 147.0 + 25.0 * static_cast<double>(row), {}});
+        table.rows.push_back(
+            {"C24", "47x" + std::to_string(147 + 25 * row), 147.0 + 25.0 * static_cast<double>(row), {}});
         for (std::size_t column = 0; column < 3; ++column) {
             Cell cell;
             cell.value = unit * static_cast<double>(37 + 11 * row + 3 * column);
@@ -174,13 +181,14 @@ inline Issue issue() {
     issue.tables = {span_table("Floor joists", "C24, 47 mm", "solid timber", 40),
                     span_table("floor JOISTS", "+plies [2] of */?: a name beyond 31 characters", "glulam", 3),
                     span_table("floor joists", "+plies [2] of */?: a name beyond 31 characters, again", "glulam", 3),
-                    other_table(TableKind::permissible_load, 1e-4), other_table(TableKind::utilisation, 0.01),
+                    other_table(TableKind::permissible_load, 1e-4),
+                    other_table(TableKind::utilisation, 0.01),
                     smallest_sections()};
     issue.basis = {{"Standards", "Basis of design", "EN 1990:2002+A1:2005", "", "standard"},
                    {"Standards", "Timber", "EN 1995-1-1:2004+A1:2008+A2:2014", "", "standard"},
                    {"Span and bearing", "Bearing length", "50 mm at each support", "", "brief"},
-                   {"Span and bearing", "-leading sign", std::string(400, 'w') + " and words after a very long one", "6.1",
-                    "brief"},
+                   {"Span and bearing", "-leading sign", std::string(400, 'w') + " and words after a very long one",
+                    "6.1", "brief"},
                    {"Parameters", "gamma_G", "1.35  (permanent actions)", "EN 1990 Table A1.2(B)", "recommended"}};
     issue.sources = {{"parameter", "gamma_G", "1.35", "EN 1990:2002", false, false},
                      {"strength class", "C24", "fm,k 24 MPa", "EN 338:2016", true, false},

@@ -14,8 +14,8 @@ template <class N> N bending_stress(const N& M_d, const N& W) {
 
 /// Table 6.1: effective length from a fraction of the span (or of the restraint spacing).
 template <class N> struct EffectiveLength {
-    N length;   ///< span, or spacing of restraints, mm
-    N fraction; ///< 0.9 uniform load, 1.0 constant moment, cantilever 0.5 uniform, 0.8 end force
+    N length;           ///< span, or spacing of restraints, mm
+    N fraction;         ///< 0.9 uniform load, 1.0 constant moment, cantilever 0.5 uniform, 0.8 end force
     N height_allowance; ///< +2h load on the top, 0 at the centroid, -0.5h hanging from the bottom, mm
 };
 
@@ -26,8 +26,8 @@ template <class N> N effective_length(const EffectiveLength<N>& x) {
 }
 
 template <class N> struct SlenderRectangle {
-    N b; ///< mm
-    N h; ///< mm
+    N b;      ///< mm
+    N h;      ///< mm
     N E_0_05; ///< MPa
     N G_0_05; ///< MPa
 };
@@ -45,8 +45,7 @@ template <class N> struct TorsionProperties {
 };
 
 /// (6.31): σm,crit = π sqrt(E0,05 Iz G0,05 Itor)/(lef Wy), MPa
-template <class N>
-N critical_stress(const SlenderRectangle<N>& x, const TorsionProperties<N>& section, const N& l_ef) {
+template <class N> N critical_stress(const SlenderRectangle<N>& x, const TorsionProperties<N>& section, const N& l_ef) {
     return named("sigma_m_crit", "MPa", "EN 1995-1-1 (6.31)",
                  3.141592653589793 * root(x.E_0_05 * section.I_z * x.G_0_05 * section.I_tor) / (l_ef * section.W));
 }

@@ -3,10 +3,12 @@
 
 #include "spanledger/limits.hpp"
 #include "spanledger/number/growth.hpp"
+#include "spanledger/number/traced.hpp"
 #include "spanledger/results/issue.hpp"
 
 #include <array>
 #include <memory>
+#include <optional>
 #include <string>
 #include <vector>
 
@@ -89,6 +91,10 @@ public:
 
     /// How the checks of a limit grow with the span, for every spacing within `spacing`.
     virtual void growth(Limit limit, const Growth& spacing, const Growth& L, Check<Growth>* out) const = 0;
+
+    /// All checks of one limit at a clear span (mm), each value with the way it came about.
+    [[nodiscard]] virtual std::vector<Check<Traced>> trace(Limit limit, const Variation& variation,
+                                                           const Traced& clear_span) const = 0;
 
     /// Effective spans (mm) at which a rule of this limit changes, with or without a jump.
     [[nodiscard]] virtual std::vector<double> breaks(Limit limit) const = 0;

@@ -9,8 +9,8 @@
 
 namespace spanledger {
 
-/// The curves of one member at one spacing, from the lower bound of the search to the span at which no variable action
-/// is left. Empty where the member is not covered or carries nothing.
+/// The curves of one member at one spacing, from where the load comes below the top of the chart to the span at which
+/// no variable action is left. Empty where the member is not covered or carries nothing.
 [[nodiscard]] std::optional<LimitCurves> limit_curves(const Inputs& inputs, const Member& member,
                                                       const LoadClass& load, double spacing);
 

@@ -118,9 +118,12 @@ private:
                 out(select(V > half, moment(load, L), N(0.0)), moment_resistance_at(V));
                 continue;
             }
-            const auto at = [&](const N& V) { return en1993::moment_at(load, L, en1993::section_with_shear(load, L, V)); };
-            out(at(half), section_.M_c);
-            out(at(section_.V_c), moment_resistance_at(section_.V_c));
+            const auto moment_where = [&](const N& V) {
+                return en1993::moment_at(load, L, en1993::section_with_shear(load, L, V));
+            };
+            // V is F/2 at mid-span and no less before it.
+            out(moment_where(half), moment_resistance_at(greatest(half, load.F / 2.0)));
+            out(moment_where(section_.V_c), moment_resistance_at(section_.V_c));
         }
     }
 

@@ -30,18 +30,32 @@ public:
     /// Calls out(demand, resistance) for each check of the limit, in the order of the plan's parts.
     template <class Out> void checks(Limit limit, const N& L, Out&& out) const {
         switch (limit) {
-        case Limit::bending: return bending(L, out);
-        case Limit::shear: return shear(L, out);
-        case Limit::bearing: return bearing(L, out);
-        case Limit::lateral_buckling: return lateral_buckling(L, out);
-        case Limit::variable_deflection: return variable_deflection(L, out);
-        case Limit::instantaneous_deflection: return instantaneous_deflection(L, out);
-        case Limit::final_deflection: return final_deflection(L, out);
-        case Limit::frequency: out(in_.min_frequency, first_frequency(L)); return;
-        case Limit::unit_load_deflection: return unit_load_deflection(L, out);
-        case Limit::velocity_response: return velocity_response(L, out);
-        case Limit::stock_length: out(named("l", "mm", "common practice", L + in_.t), in_.stock_length); return;
-        case Limit::bending_with_shear: return;
+        case Limit::bending:
+            return bending(L, out);
+        case Limit::shear:
+            return shear(L, out);
+        case Limit::bearing:
+            return bearing(L, out);
+        case Limit::lateral_buckling:
+            return lateral_buckling(L, out);
+        case Limit::variable_deflection:
+            return variable_deflection(L, out);
+        case Limit::instantaneous_deflection:
+            return instantaneous_deflection(L, out);
+        case Limit::final_deflection:
+            return final_deflection(L, out);
+        case Limit::frequency:
+            out(in_.min_frequency, first_frequency(L));
+            return;
+        case Limit::unit_load_deflection:
+            return unit_load_deflection(L, out);
+        case Limit::velocity_response:
+            return velocity_response(L, out);
+        case Limit::stock_length:
+            out(named("l", "mm", "common practice", L + in_.t), in_.stock_length);
+            return;
+        case Limit::bending_with_shear:
+            return;
         }
     }
 
@@ -61,9 +75,10 @@ public:
     [[nodiscard]] N net_final(const ServiceCase& service, const N& L) const {
         const ServiceDeflections w = deflections(service, L);
         const N w_fin_G = en1995::final_deflection_permanent(w.w_G, in_.k_def);
-        const N w_fin_partitions = kinds_->partitions_creep_permanent
-                                       ? en1995::final_deflection_permanent(w.w_partitions, in_.k_def)
-                                       : en1995::final_deflection_variable(w.w_partitions, actions_.psi_2(service.action), in_.k_def);
+        const N w_fin_partitions =
+            kinds_->partitions_creep_permanent
+                ? en1995::final_deflection_permanent(w.w_partitions, in_.k_def)
+                : en1995::final_deflection_variable(w.w_partitions, actions_.psi_2(service.action), in_.k_def);
         const N w_fin_Q = en1995::final_deflection_variable(w.w_Q, actions_.psi_2(service.action), in_.k_def);
         const N w_fin = named("w_fin", "mm", "EN 1995-1-1 (2.2)", w_fin_G + w_fin_partitions + w_fin_Q);
         return kinds_->camber ? en1995::net_final_deflection(w_fin, in_.camber, w_fin_G) : w_fin;
@@ -80,8 +95,7 @@ public:
     /// Strength in bearing over which the contact length is worked out, N per mm of contact length.
     [[nodiscard]] N bearing_resistance_per_length(std::size_t combination, const N& L) const {
         const Design& d = design_[combination];
-        return bearing_factor(L) * d.k_sys *
-               en1995::design_strength(d.k_mod, in_.f_c_90_k, in_.gamma_M) * width_;
+        return bearing_factor(L) * d.k_sys * en1995::design_strength(d.k_mod, in_.f_c_90_k, in_.gamma_M) * width_;
     }
 
     /// λrel,m of the compression edge under the uniform load, or (cantilever) under a force at its end.
@@ -114,8 +128,8 @@ private:
         W_ = rectangle::section_modulus(width_, in_.h);
         EI_ = named("EI", "Nmm2", "geometry", in_.E_mean * rectangle::second_moment(width_, in_.h));
         if (kinds_->shear_deflection) {
-            shear_flexibility_ = named("kappa/GA", "1/N", "beam theory",
-                                       1.2 / (in_.G_mean * rectangle::area(width_, in_.h)));
+            shear_flexibility_ =
+                named("kappa/GA", "1/N", "beam theory", 1.2 / (in_.G_mean * rectangle::area(width_, in_.h)));
         }
     }
 
@@ -153,9 +167,12 @@ private:
     [[nodiscard]] N size_factor() const {
         const en1995::SizeFactor<N> rule{in_.kh_depth, in_.kh_exponent, in_.kh_cap};
         switch (kinds_->size_rule) {
-        case SizeRule::below_reference_depth: return en1995::size_factor_below_reference_depth(rule, in_.h);
-        case SizeRule::lvl: return en1995::size_factor_lvl(rule, in_.h);
-        case SizeRule::none: break;
+        case SizeRule::below_reference_depth:
+            return en1995::size_factor_below_reference_depth(rule, in_.h);
+        case SizeRule::lvl:
+            return en1995::size_factor_lvl(rule, in_.h);
+        case SizeRule::none:
+            break;
         }
         return N(1.0);
     }
@@ -170,8 +187,7 @@ private:
             return kinds_->shear_deflection ? w + beam::cantilever::shear_deflection(load, L, shear_flexibility_) : w;
         }
         const N w = beam::simply_supported::bending_deflection(load, L, EI_);
-        return kinds_->shear_deflection ? w + beam::simply_supported::shear_deflection(load, L, shear_flexibility_)
-                                        : w;
+        return kinds_->shear_deflection ? w + beam::simply_supported::shear_deflection(load, L, shear_flexibility_) : w;
     }
 
     template <class Out> void bending(const N& L, Out& out) const {
@@ -188,7 +204,8 @@ private:
     }
 
     [[nodiscard]] N shear_force(const beam::Load<N>& load, const N& L) const {
-        if (kinds_->cantilever) return beam::cantilever::shear(load, L);
+        if (kinds_->cantilever)
+            return beam::cantilever::shear(load, L);
         if (!kinds_->uniform_near_support && !kinds_->concentrated_near_support) {
             return beam::simply_supported::shear(load, L);
         }
@@ -197,19 +214,20 @@ private:
         const beam::Load<N> concentrated{N(0.0), load.F};
         const N V_q = kinds_->uniform_near_support ? en1995::uniform_shear_beyond_depth(load.q, L, support)
                                                    : beam::simply_supported::shear(uniform, L);
-        const N V_F = kinds_->concentrated_near_support
-                          ? en1995::concentrated_shear_beyond_depth(load.F, L, support)
-                          : beam::simply_supported::shear(concentrated, L);
+        const N V_F = kinds_->concentrated_near_support ? en1995::concentrated_shear_beyond_depth(load.F, L, support)
+                                                        : beam::simply_supported::shear(concentrated, L);
         return named("V_d", "N", "EN 1995-1-1 6.1.7", V_q + V_F);
     }
 
     [[nodiscard]] N bearing_factor(const N& L) const {
         const N clear_span = L - in_.t;
         switch (kinds_->bearing_rule) {
-        case BearingRule::discrete: return en1995::bearing_factor(in_.k_c_90, clear_span, in_.h);
+        case BearingRule::discrete:
+            return en1995::bearing_factor(in_.k_c_90, clear_span, in_.h);
         case BearingRule::glulam:
             return en1995::bearing_factor_glulam({in_.k_c_90, in_.t, in_.k_c_90_max_t}, clear_span, in_.h);
-        case BearingRule::none: break;
+        case BearingRule::none:
+            break;
         }
         return N(1.0);
     }
@@ -249,17 +267,20 @@ private:
             return en1995::effective_length<N>({L, end_force ? N(0.8) : N(0.5), allowance});
         }
         const N unrestrained = en1995::effective_length<N>({L, N(0.9), allowance});
-        if (!kinds_->restrained_at_intervals) return unrestrained;
+        if (!kinds_->restrained_at_intervals)
+            return unrestrained;
         const N between = en1995::effective_length<N>({in_.restraint_spacing, N(1.0), allowance});
-        return named("l_ef", "mm", "EN 1995-1-1 Table 6.1",
-                     select(in_.restraint_spacing >= L, unrestrained, between));
+        return named("l_ef", "mm", "EN 1995-1-1 Table 6.1", select(in_.restraint_spacing >= L, unrestrained, between));
     }
 
     [[nodiscard]] N height_allowance() const {
         switch (kinds_->load_position) {
-        case LoadPosition::top: return 2.0 * in_.h;
-        case LoadPosition::bottom: return -0.5 * in_.h;
-        case LoadPosition::centroid: break;
+        case LoadPosition::top:
+            return 2.0 * in_.h;
+        case LoadPosition::bottom:
+            return -0.5 * in_.h;
+        case LoadPosition::centroid:
+            break;
         }
         return N(0.0);
     }
@@ -271,8 +292,10 @@ private:
     };
 
     template <class Out> void deflection_checks(const N& w, const DeflectionCriteria& c, const N& L, Out& out) const {
-        if (kinds_->has_ratio[c.index]) out(w, named("w_lim", "mm", "EN 1995-1-1 7.2", L / c.ratio));
-        if (kinds_->has_length[c.index]) out(w, c.length);
+        if (kinds_->has_ratio[c.index])
+            out(w, named("w_lim", "mm", "EN 1995-1-1 7.2", L / c.ratio));
+        if (kinds_->has_length[c.index])
+            out(w, c.length);
     }
 
     template <class Out> void variable_deflection(const N& L, Out& out) const {
@@ -298,7 +321,8 @@ private:
     }
 
     [[nodiscard]] N unit_load_limit(const N& L) const {
-        if (kinds_->vibration == VibrationRuleSet::recommended) return in_.a;
+        if (kinds_->vibration == VibrationRuleSet::recommended)
+            return in_.a;
         return uk::unit_load_limit<N>({in_.a_short, in_.a_short_span, in_.a_long, in_.a_long_exponent}, L);
     }
 
@@ -312,10 +336,10 @@ private:
     template <class Out> void velocity_response(const N& L, Out& out) const {
         const N f_1 = first_frequency(L);
         const N n_40 = en1995::modes_below_40_hz(floor_, f_1, in_.floor_width / L);
-        const N modal_mass = named("m B L", "kg", "EN 1995-1-1 7.3.3",
-                                   actions_.permanent_without_partitions() / actions_.spacing() / gravity * in_.floor_width * L);
-        const N b = kinds_->vibration == VibrationRuleSet::uk ? uk::velocity_base(unit_load_limit(L))
-                                                              : in_.b_velocity;
+        const N modal_mass =
+            named("m B L", "kg", "EN 1995-1-1 7.3.3",
+                  actions_.permanent_without_partitions() / actions_.spacing() / gravity * in_.floor_width * L);
+        const N b = kinds_->vibration == VibrationRuleSet::uk ? uk::velocity_base(unit_load_limit(L)) : in_.b_velocity;
         out(en1995::velocity_response(n_40, modal_mass), en1995::velocity_limit(b, f_1, in_.damping));
     }
 

@@ -91,27 +91,42 @@ inline TracedCondition compared(Operation operation, bool holds, const Trace& a,
 }
 } // namespace words
 
+/// A constant needs no name: a quantity that a kind makes 0 or 1 drops out of the formulas it stands in.
 inline Traced named(const char* symbol, const char* unit, const char* clause, const Traced& x) {
     const TraceNode& from = *x.trace();
-    const bool own_operation = !from.is_named() && from.operation != Operation::constant;
-    TraceNode node = own_operation ? from : TraceNode{Operation::same, from.value, {x.trace()}, {}, {}, {}};
+    if (!from.is_named() && from.operation == Operation::constant) return x;
+    TraceNode node = from.is_named() ? TraceNode{Operation::same, from.value, {x.trace()}, {}, {}, {}} : from;
     node.symbol = symbol;
     node.unit = unit;
     node.clause = clause;
     return Traced(std::make_shared<const TraceNode>(std::move(node)));
 }
 
+namespace words {
+inline bool is_constant(const Traced& x, double value) {
+    return x.trace()->operation == Operation::constant && x.value() == value;
+}
+} // namespace words
+
 inline Traced operator+(const Traced& a, const Traced& b) {
+    if (words::is_constant(a, 0.0)) return b;
+    if (words::is_constant(b, 0.0)) return a;
     return words::traced(Operation::add, a.value() + b.value(), a, b);
 }
 inline Traced operator-(const Traced& a, const Traced& b) {
+    if (words::is_constant(b, 0.0)) return a;
     return words::traced(Operation::subtract, a.value() - b.value(), a, b);
 }
-inline Traced operator-(const Traced& a) { return words::traced(Operation::multiply, -a.value(), Traced(-1.0), a); }
 inline Traced operator*(const Traced& a, const Traced& b) {
+    if (words::is_constant(a, 0.0) || words::is_constant(b, 0.0)) return Traced(0.0);
+    if (words::is_constant(a, 1.0)) return b;
+    if (words::is_constant(b, 1.0)) return a;
     return words::traced(Operation::multiply, a.value() * b.value(), a, b);
 }
+inline Traced operator-(const Traced& a) { return Traced(-1.0) * a; }
 inline Traced operator/(const Traced& a, const Traced& b) {
+    if (words::is_constant(a, 0.0)) return a;
+    if (words::is_constant(b, 1.0)) return a;
     return words::traced(Operation::divide, a.value() / b.value(), a, b);
 }
 

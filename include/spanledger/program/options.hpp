@@ -29,7 +29,8 @@ struct CommandRow {
     std::string_view meaning;
     std::string_view example; ///< runs as printed where `start` has written its files
     std::span<const OptionRow> options;
-    std::span<const std::string_view> words = {}; ///< what the first operand may be; empty where it names a file
+    std::string_view choice = {};                 ///< the first operand, where it is one of `words`
+    std::span<const std::string_view> words = {}; ///< empty where the first operand names a file
 };
 
 [[nodiscard]] std::span<const CommandRow> command_table() noexcept;
@@ -39,6 +40,9 @@ struct CommandRow {
 
 /// Its own options, then those of every command.
 [[nodiscard]] std::vector<OptionRow> all_options(const CommandRow& command);
+
+/// "TOPIC is a, b or c.", or empty where no operand is a choice.
+[[nodiscard]] std::string operand_words(const CommandRow& command);
 
 /// What --print can print, for packagers.
 [[nodiscard]] std::span<const std::string_view> document_words() noexcept;

@@ -9,8 +9,8 @@
 
 namespace spanledger {
 
-/// Writes the issued workbook to `file`. `fingerprint` is asked for once, after the tables are filled in, so that it may
-/// be computed meanwhile.
+/// Writes the issued workbook to `file`. `fingerprint` is asked for once, after the tables are filled in, so that it
+/// may be computed meanwhile.
 [[nodiscard]] WriteResult write_workbook(const Issue& issue, const std::string& file,
                                          const std::function<std::string()>& fingerprint);
 

@@ -6,8 +6,8 @@
 #include <string>
 #include <string_view>
 
-// Writing without ever leaving something half-written: beside the target, then renamed over it. The old file stays as it
-// is until the new one is whole and on the disk.
+// Writing without ever leaving something half-written: beside the target, then renamed over it. The old file stays as
+// it is until the new one is whole and on the disk.
 
 namespace spanledger {
 

@@ -56,7 +56,8 @@ struct Area {
     At last;
 };
 
-/// Header and footer: left, centre and right part. "&[page]" and "&[pages]" stand for the page's number and their count.
+/// Header and footer: left, centre and right part. "&[page]" and "&[pages]" stand for the page's number and their
+/// count.
 struct PageWords {
     std::string left;
     std::string centre;
@@ -70,7 +71,7 @@ struct PageSetUp {
     Area print_area;
     std::uint32_t first_repeated_row = 0;
     std::uint32_t last_repeated_row = 0;
-    At frozen; ///< first cell that scrolls
+    At frozen;             ///< first cell that scrolls
     bool one_page = false; ///< fitted to one page's height too
 };
 
@@ -80,8 +81,31 @@ struct Properties {
     std::string author;
     std::string company;
     std::string comments;
-    std::string date; ///< yyyy-mm-dd; a fixed day in 1980 where it is none
+    std::string date;                                        ///< yyyy-mm-dd; a fixed day in 1980 where it is none
     std::vector<std::pair<std::string, std::string>> custom; ///< name and value
+};
+
+/// One line of a chart: a row of points in the cells of its sheet, its look told apart by marker and dash.
+struct ChartLine {
+    std::string name;
+    Area spans;              ///< cells along the horizontal axis
+    Area values;             ///< cells along the vertical axis
+    std::size_t look = 0;    ///< lines of different look differ in marker, dash and grey
+    bool is_envelope = false; ///< drawn thick, without markers
+};
+
+/// A chart of lines over numbers on both axes.
+struct Chart {
+    std::string title;
+    std::string horizontal; ///< axis titles, with units
+    std::string vertical;
+    std::string description; ///< what it shows, for who cannot see it
+    double width = 0.0;      ///< points
+    double height = 0.0;
+    double least_span = 0.0;
+    double greatest_span = 0.0;
+    double greatest_value = 0.0;
+    std::vector<ChartLine> lines;
 };
 
 struct BookState;
@@ -98,6 +122,7 @@ public:
     void column_width(std::uint32_t column, double points);
     void row_height(std::uint32_t row, double points);
     void set_up(const PageSetUp& page);
+    void chart(At at, const Chart& chart);
 
     [[nodiscard]] const std::string& name() const noexcept { return name_; }
 
@@ -134,8 +159,8 @@ private:
     std::unique_ptr<BookState> state_;
 };
 
-/// Reads every part of a workbook file and checks that it is whole: a disk that fills up while the parts are made leaves
-/// shortened parts in a file that is otherwise well-formed.
+/// Reads every part of a workbook file and checks that it is whole: a disk that fills up while the parts are made
+/// leaves shortened parts in a file that is otherwise well-formed.
 [[nodiscard]] WriteResult check_parts(const std::string& file);
 
 } // namespace spanledger::xlsx
