@@ -1,6 +1,9 @@
 // SPDX-License-Identifier: MIT
 #include "spanledger/engine/basis_statement.hpp"
 
+#include "cold_formed_statement.hpp"
+#include "rolled_statement.hpp"
+
 #include <fmt/format.h>
 
 #include <algorithm>
@@ -22,6 +25,8 @@ public:
         combinations();
         load_classes();
         limits();
+        for (BasisLine& line : rolled_lines(*inputs_)) lines_.push_back(std::move(line));
+        for (BasisLine& line : cold_formed_lines(*inputs_)) lines_.push_back(std::move(line));
         parameters();
         assumptions();
         exclusions();

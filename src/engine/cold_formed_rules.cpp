@@ -35,12 +35,6 @@ struct ColdFormedFamily {
     static std::vector<std::string> notes(const Kinds& /*kinds*/) { return {}; }
 };
 
-double lowest_frequency(const ColdFormedKinds& kinds, const ColdFormedJoist<double>& joist, double L) {
-    double lowest = words::infinity;
-    for (const ServiceCase& service : kinds.frequency) lowest = std::min(lowest, joist.first_frequency(service, L));
-    return lowest;
-}
-
 /// (6.15a) solved for the bearing length.
 double bearing_length_needed(const ColdFormedJoist<double>& joist, double reaction) {
     return std::max(0.0, 100.0 * joist.section().size.t * (reaction / joist.section().R_w_0 - 1.0));
@@ -55,7 +49,7 @@ JoistFacts ColdFormedFamily::facts(const Kinds& kinds, const Inputs<double>& /*i
             const auto w = joist.deflections(service, L);
             return std::vector{w.w_Q, w.w_inst};
         });
-    if (joist.actions().permanent() > 0.0) facts.first_frequency = lowest_frequency(kinds, joist, L);
+    if (joist.actions().permanent() > 0.0) facts.first_frequency = joist.first_frequency(ServiceCase{}, L); // permanent mass
     facts.reactions = support_reactions(kinds, joist, L, false);
     if (!kinds.web_stiffened) {
         facts.bearing_length_needed =

@@ -4,6 +4,7 @@
 #include "spanledger/engine/rolled_properties.hpp"
 #include "spanledger/engine/rolled_rules.hpp"
 #include "steel_deflection_limits.hpp"
+#include "steel_frequency.hpp"
 
 #include <fmt/format.h>
 
@@ -19,7 +20,9 @@ std::optional<double> yield_strength(const SteelGrade& grade, double thickness) 
 
 namespace {
 
-double thickest_part(const RolledSection& section) { return std::max(section.t_w, section.t_f); }
+double thickest_part(const RolledSection& section) {
+    return std::max(section.t_w, section.t_f);
+}
 
 void fill_steel(RolledInputs<double>& x, const Catalogue& catalogue, const RolledMember& member) {
     const RolledSection& section = member.section;
@@ -102,16 +105,6 @@ LoadHeight load_height(const Support& support) {
     case LoadPosition::bottom: return LoadHeight::bottom;
     }
     return LoadHeight::top;
-}
-
-/// Frequency takes the uniform alternatives only.
-std::vector<ServiceCase> frequency_cases(const LoadClass& load, UniformAction uniform) {
-    std::vector<ServiceCase> cases;
-    for (const Action action : variable_actions(load, uniform)) {
-        if (action != Action::concentrated) cases.push_back({action, action_name(action)});
-    }
-    if (cases.empty()) cases.push_back({Action::none, action_name(Action::none)});
-    return cases;
 }
 
 std::string class_4_reason(const RolledKinds& kinds, const RolledInputs<double>& x) {

@@ -2,6 +2,7 @@
 #include "rolled_plans.hpp"
 
 #include "steel_deflection_limits.hpp"
+#include "steel_frequency.hpp"
 
 #include <fmt/format.h>
 
@@ -143,25 +144,13 @@ private:
                    : "not asked for in the brief";
     }
 
-    /// A frequency needs mass in every case that is checked.
-    bool has_mass(double variable_share) const {
-        if (kinds_->self_weight || load_->permanent + load_->permanent_partitions > 0.0) return true;
-        for (const ServiceCase& service : kinds_->frequency) {
-            const double area_load = service.action == Action::uniform ? load_->variable + load_->partitions
-                                     : service.action == Action::snow  ? load_->snow
-                                                                       : 0.0;
-            if (variable_share * area_load <= 0.0) return false;
-        }
-        return true;
-    }
-
     void frequency(const std::string& clause) {
         const auto& asked = inputs_->brief.limits.frequency;
         if (!asked) {
             not_applicable(Limit::frequency, clause, not_asked_for());
             return;
         }
-        if (!has_mass(asked->variable_share)) {
+        if (!kinds_->self_weight && !have_mass(kinds_->frequency, *load_, asked->variable_share)) {
             return not_covered(Limit::frequency, clause, "no permanent load: the joist has no mass");
         }
         std::vector<std::string> parts;

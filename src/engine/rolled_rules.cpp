@@ -21,8 +21,7 @@ struct RolledFamily {
     template <class N> static Section<N> section(const Kinds& kinds, const Inputs<N>& inputs) {
         return rolled_properties(kinds, inputs);
     }
-    template <class N>
-    static Joist<N> joist(const Kinds& kinds, const Inputs<N>& inputs, const Section<N>& section) {
+    template <class N> static Joist<N> joist(const Kinds& kinds, const Inputs<N>& inputs, const Section<N>& section) {
         return {kinds, inputs, section};
     }
 
@@ -32,12 +31,6 @@ struct RolledFamily {
     static double depth(const Inputs<double>& inputs) { return inputs.size.h; }
     static std::vector<std::string> notes(const Kinds& kinds);
 };
-
-double lowest_frequency(const RolledKinds& kinds, const RolledJoist<double>& joist, double L) {
-    double lowest = words::infinity;
-    for (const ServiceCase& service : kinds.frequency) lowest = std::min(lowest, joist.first_frequency(service, L));
-    return lowest;
-}
 
 /// The shortest bearing at which the web resists the reaction; empty where none is long enough.
 std::optional<double> bearing_length_needed(RolledInputs<double> inputs, double reaction) {
@@ -66,11 +59,12 @@ JoistFacts RolledFamily::facts(const Kinds& kinds, const Inputs<double>& inputs,
             return std::vector{w.w_Q, w.w_inst};
         });
     if (!kinds.cantilever && joist.actions().permanent() > 0.0) {
-        facts.first_frequency = lowest_frequency(kinds, joist, L);
+        facts.first_frequency = joist.first_frequency(ServiceCase{}, L); // permanent mass
     }
     facts.reactions = support_reactions(kinds, joist, L, kinds.cantilever);
     if (!kinds.cantilever && !kinds.web_stiffened) {
-        facts.bearing_length_needed = bearing_length_needed(inputs, joist.reaction(worst_combination(kinds, joist, L), L));
+        facts.bearing_length_needed =
+            bearing_length_needed(inputs, joist.reaction(worst_combination(kinds, joist, L), L));
     }
     return facts;
 }
@@ -87,8 +81,7 @@ std::vector<std::string> RolledFamily::notes(const Kinds& kinds) {
 
 } // namespace
 
-std::unique_ptr<JoistRules> make_rolled_rules(RolledKinds kinds, const RolledInputs<double>& inputs,
-                                              LimitPlans plans) {
+std::unique_ptr<JoistRules> make_rolled_rules(RolledKinds kinds, const RolledInputs<double>& inputs, LimitPlans plans) {
     return std::make_unique<FamilyRules<RolledFamily>>(std::move(kinds), inputs, std::move(plans));
 }
 

@@ -59,11 +59,31 @@ JoistFacts TimberFamily::facts(const Kinds& kinds, const Inputs<double>& inputs,
     return facts;
 }
 
+/// Where the restraints begin to count, and where kcrit steps: it rises at the slenderness of 1.4, so that a joist may
+/// fail just below and pass again just above. The square of the slenderness is linear in l_ef and so in L, but for the
+/// least value of l_ef, which only holds for spans near the depth.
+std::vector<double> lateral_buckling_breaks(const TimberKinds& kinds, const TimberInputs<double>& inputs) {
+    TimberKinds unrestrained = kinds;
+    unrestrained.restrained_at_intervals = false;
+    const TimberJoist<double> joist(unrestrained, inputs);
+    const double L_1 = 10.0 * inputs.h;
+    const double L_2 = 2.0 * L_1;
+    std::vector<double> spans;
+    if (kinds.restrained_at_intervals) spans.push_back(inputs.restraint_spacing);
+    for (const bool end_force : {false, true}) {
+        const double at_1 = squared(joist.relative_slenderness(L_1, end_force));
+        const double slope = (squared(joist.relative_slenderness(L_2, end_force)) - at_1) / (L_2 - L_1);
+        for (const double lambda : {en1995::stocky_up_to, en1995::intermediate_up_to}) {
+            spans.push_back(L_1 + (squared(lambda) - at_1) / slope);
+        }
+    }
+    return spans;
+}
+
 std::vector<double> TimberFamily::breaks(const Kinds& kinds, const Inputs<double>& inputs, Limit limit) {
     switch (limit) {
     case Limit::bearing: return {2.0 * inputs.h + inputs.t};
-    case Limit::lateral_buckling:
-        return kinds.restrained_at_intervals ? std::vector{inputs.restraint_spacing} : std::vector<double>{};
+    case Limit::lateral_buckling: return lateral_buckling_breaks(kinds, inputs);
     case Limit::unit_load_deflection:
     case Limit::velocity_response: return {inputs.a_short_span};
     case Limit::shear: return {2.0 * inputs.h + inputs.t, inputs.h + inputs.t / 2.0};

@@ -70,13 +70,8 @@ RolledSection read_section(CsvRecord& record) {
 
 void read_steel_grades(const RowFile& file, const std::vector<Source>& sources, RowCollector<SteelGrade>& collector,
                        Diagnostics& diagnostics) {
-    static const std::array<CsvColumn, 7> columns{{{"grade"},
-                                                   {"standard"},
-                                                   {"f_y_16_MPa"},
-                                                   {"f_y_40_MPa", false},
-                                                   {"source"},
-                                                   {"seen", false},
-                                                   {"note", false}}};
+    static const std::array<CsvColumn, 7> columns{
+        {{"grade"}, {"standard"}, {"f_y_16_MPa"}, {"f_y_40_MPa", false}, {"source"}, {"seen", false}, {"note", false}}};
     for_each_record(file, columns, diagnostics, [&](CsvRecord& record) {
         SteelGrade row = read_grade(record);
         row.provenance = read_provenance(record, file, sources);

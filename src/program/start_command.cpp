@@ -28,6 +28,7 @@ struct FileToWrite {
 
 std::vector<FileToWrite> files_to_write(const fs::path& folder, bool with_catalogue) {
     std::vector<FileToWrite> files;
+    files.reserve(starter_files.size() + builtin_files().size());
     for (const std::string_view name : starter_files) files.push_back({(folder / name).string(), builtin_file(name)});
     for (const BuiltinFile& file : builtin_files()) {
         const bool starter = std::find(starter_files.begin(), starter_files.end(), file.name) != starter_files.end();

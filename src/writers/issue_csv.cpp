@@ -18,7 +18,9 @@ constexpr std::string_view line_end = "\r\n";
 void append_metres_down(std::string& line, double mm) {
     constexpr double rounding = 1e-7; // a whole number of mm but for the last digits is that number
     const auto whole = static_cast<long long>(std::floor(mm + rounding));
-    fmt::format_to(std::back_inserter(line), "{}.{:03}", whole / 1000, whole % 1000);
+    const fmt::format_int metres(whole / 1000);
+    const fmt::format_int millimetres(1000 + whole % 1000); // three digits behind the first
+    line.append(metres.data(), metres.size()).append(1, '.').append(millimetres.data() + 1, millimetres.size() - 1);
 }
 
 /// A utilisation with four decimals, rounded up.

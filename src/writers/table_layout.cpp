@@ -13,8 +13,9 @@ namespace spanledger {
 namespace {
 
 /// Wider sheets would shrink below legible print when fitted to a page.
-constexpr double widest_sheet = 1080.0;
+constexpr double widest_sheet = 1110.0;
 constexpr double least_cell_width = 46.0;
+constexpr double parting_width = 6.0;
 constexpr Font cell_font{10.0, false};
 constexpr Font head_font{9.0, true};
 
@@ -83,6 +84,14 @@ std::vector<LoadGroup> groups_of(const TableResult& table, std::size_t first, st
     return groups;
 }
 
+/// Width of each cell under a load class: its name has two lines over its columns; longer ones take more.
+double width_of_cells(const LoadGroup& group, const TableFacts& facts) {
+    constexpr double widest_cell = 90.0;
+    const auto columns = static_cast<double>(group.last - group.first);
+    const double name = (text_width(group.load, head_font) / 2.0 + 3.0 * cell_padding) / columns;
+    return std::clamp(name, facts.cell_width, std::max(facts.cell_width, widest_cell));
+}
+
 } // namespace
 
 TableFacts facts_of(const TableResult& table, const SearchRange& search) {
@@ -92,23 +101,27 @@ TableFacts facts_of(const TableResult& table, const SearchRange& search) {
 std::vector<TablePart> parts_of(const TableResult& table, std::size_t number, const SearchRange& search) {
     const auto facts = std::make_shared<const TableFacts>(facts_of(table, search));
     const double room = widest_sheet - first_head_width(table) - second_head_width(table);
-    const auto most = std::max<std::size_t>(1, static_cast<std::size_t>(room / facts->cell_width));
     std::vector<TablePart> parts;
     TablePart part{.table = &table, .facts = facts, .number = number};
+    double taken = 0.0;
+    const auto end_part = [&] {
+        if (part.last == part.first) return;
+        parts.push_back(part);
+        part.first = part.last;
+        taken = 0.0;
+    };
     for (const LoadGroup& group : groups_of(table, 0, table.columns.size())) {
-        const bool fits_with_others = group.last - part.first <= most;
-        if (!fits_with_others && part.last > part.first) {
-            parts.push_back(part);
-            part.first = part.last;
+        const double width = width_of_cells(group, *facts);
+        const auto columns = static_cast<double>(group.last - group.first);
+        if (taken + parting_width + columns * width > room) end_part();
+        for (std::size_t column = group.first; column < group.last; ++column) {
+            if (taken + parting_width + width > room) end_part();
+            part.last = column + 1;
+            taken += width;
         }
-        while (group.last - part.first > most) {
-            part.last = part.first + most;
-            parts.push_back(part);
-            part.first = part.last;
-        }
-        part.last = group.last;
+        taken += parting_width;
     }
-    parts.push_back(part);
+    if (parts.empty() || part.last > part.first) parts.push_back(part);
     for (std::size_t i = 0; i < parts.size(); ++i) {
         parts[i].part = i + 1;
         parts[i].parts = parts.size();
@@ -119,16 +132,13 @@ std::vector<TablePart> parts_of(const TableResult& table, std::size_t number, co
 TableLayout layout_of(const TablePart& part) {
     TableLayout layout;
     layout.groups = groups_of(*part.table, part.first, part.last);
-    layout.cell_columns = part.last - part.first;
     layout.widths = {first_head_width(*part.table), second_head_width(*part.table)};
-    const double width = part.facts->cell_width;
     for (const LoadGroup& group : layout.groups) {
-        const auto columns = static_cast<double>(group.last - group.first);
-        // A load class's name has two lines over its columns; longer ones take more.
-        constexpr double widest_cell = 90.0;
-        const double name = (text_width(group.load, head_font) / 2.0 + 3.0 * cell_padding) / columns;
-        layout.widths.insert(layout.widths.end(), group.last - group.first,
-                             std::clamp(name, width, std::max(width, widest_cell)));
+        layout.widths.push_back(parting_width);
+        for (std::size_t column = group.first; column < group.last; ++column) {
+            layout.cell_columns.push_back(static_cast<std::uint32_t>(layout.widths.size()));
+            layout.widths.push_back(width_of_cells(group, *part.facts));
+        }
     }
     double total = std::accumulate(layout.widths.begin(), layout.widths.end(), 0.0);
     for (; total + least_cell_width <= page_width; total += least_cell_width) layout.widths.push_back(least_cell_width);
@@ -151,6 +161,10 @@ std::vector<std::uint32_t> legend_slots(const std::vector<double>& widths, doubl
     std::vector<std::uint32_t> slots;
     std::size_t column = 0;
     while (column < widths.size()) {
+        if (widths[column] <= parting_width) {
+            ++column;
+            continue;
+        }
         double found = 0.0;
         std::size_t end = column + 1;
         while (end < widths.size() && found < room) found += widths[end++];

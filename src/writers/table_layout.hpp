@@ -4,6 +4,7 @@
 #include "issue_sheets.hpp"
 #include "table_kinds.hpp"
 
+#include <cstdint>
 #include <string>
 #include <vector>
 
@@ -16,11 +17,12 @@ struct LoadGroup {
     std::size_t last = 0;  ///< one beyond
 };
 
-/// Widths of a table's sheet in points: two columns of row heads, the cells, then empty ones up to the page's width.
+/// Columns of a table's sheet: two of row heads, then the cells of each load class behind a narrow empty one that parts
+/// it from what stands before, then empty ones up to the page's width.
 struct TableLayout {
-    std::vector<double> widths;
+    std::vector<double> widths; ///< points
     std::vector<LoadGroup> groups;
-    std::size_t cell_columns = 0;
+    std::vector<std::uint32_t> cell_columns; ///< column of the sheet, per column of the part
 };
 
 inline constexpr std::uint32_t head_columns = 2;

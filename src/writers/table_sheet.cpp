@@ -22,26 +22,24 @@ const xlsx::Style row_head_style{.size = 10.0, .borders = {.bottom = Line::fine}
 /// A head taller than this repeats only its legend and column heads on later pages, and does not stay on the screen.
 constexpr double tallest_repeated_head = 240.0;
 
-/// The styles of a sheet's cells, found once: one per limit (and one for none), at the start of a group or within.
+/// The styles of a sheet's cells, found once: one per limit, and one for none.
 class CellStyles {
 public:
     CellStyles(SheetPen& pen, const std::string& number_format) {
         for (std::size_t i = 0; i <= limit_count; ++i) {
             const std::optional<Limit> limit = i < limit_count ? std::optional(static_cast<Limit>(i)) : std::nullopt;
-            for (const bool starts_group : {false, true}) {
-                xlsx::Style style = cell_style(limit, number_format);
-                style.borders = {.left = starts_group ? Line::thin : Line::none, .bottom = Line::fine};
-                ids_[i][starts_group ? 1 : 0] = pen.style(style);
-            }
+            xlsx::Style style = cell_style(limit, number_format);
+            style.borders.bottom = Line::fine;
+            ids_[i] = pen.style(style);
         }
     }
 
-    [[nodiscard]] xlsx::StyleId of(const std::optional<Limit>& governing, bool starts_group) const noexcept {
-        return ids_[governing ? index_of(*governing) : limit_count][starts_group ? 1 : 0];
+    [[nodiscard]] xlsx::StyleId of(const std::optional<Limit>& governing) const noexcept {
+        return ids_[governing ? index_of(*governing) : limit_count];
     }
 
 private:
-    std::array<std::array<xlsx::StyleId, 2>, limit_count + 1> ids_{};
+    std::array<xlsx::StyleId, limit_count + 1> ids_{};
 };
 
 class TableSheet {
@@ -128,28 +126,23 @@ private:
     }
 
     [[nodiscard]] std::uint32_t column_of(std::size_t table_column) const {
-        return head_columns + static_cast<std::uint32_t>(table_column - part_->first);
+        return layout_.cell_columns[table_column - part_->first];
     }
 
-    /// A style with the line that parts groups where the column begins one.
-    [[nodiscard]] xlsx::StyleId head_id(const xlsx::Style& style, bool starts_group) {
-        xlsx::Style with_line = style;
-        with_line.borders.left = starts_group ? Line::thin : Line::none;
-        return pen_.style(with_line);
-    }
-
-    [[nodiscard]] bool starts_group(std::size_t column) const {
-        return column == part_->first || table_->columns[column].load != table_->columns[column - 1].load;
+    /// Blanks of a style under all row heads and cells: the empty columns that part groups stay as they are.
+    void rule(const xlsx::Style& style) {
+        const xlsx::StyleId id = pen_.style(style);
+        for (std::uint32_t column = 0; column < head_columns; ++column) pen_.sheet().blank(pen_.at(column), id);
+        for (const std::uint32_t column : layout_.cell_columns) pen_.sheet().blank(pen_.at(column), id);
     }
 
     void column_heads() {
         load_names();
         head_numbers(
-            "Spacing, c/c", [](const ColumnHead& column) { return column.spacing; }, "0.##\" mm\"", Line::none);
+            "Spacing, c/c", [](const ColumnHead& column) { return column.spacing; }, "0.##\" mm\"");
         if (!table_->columns.empty() && table_->columns.front().span) {
             head_numbers(
-                "Clear span", [](const ColumnHead& column) { return *column.span / 1000.0; }, "0.00#\" m\"",
-                Line::none);
+                "Clear span", [](const ColumnHead& column) { return *column.span / 1000.0; }, "0.00#\" m\"");
         }
         units();
     }
@@ -160,7 +153,7 @@ private:
         for (const LoadGroup& group : layout_.groups) {
             double width = 0.0;
             for (std::size_t c = group.first; c < group.last; ++c) width += layout_.widths[column_of(c)];
-            names.push_back(text_lines(group.load, font_of(head_style), width - 2.0 * cell_padding));
+            names.push_back(text_lines(group.load, font_of(head_style), width - cell_padding));
             most = std::max(most, names.back().size());
         }
         for (std::size_t line = 0; line < most; ++line) load_name_line(names, line);
@@ -170,31 +163,24 @@ private:
     void load_name_line(const std::vector<std::vector<std::string>>& names, std::size_t line) {
         xlsx::Style style = head_style;
         style.borders.top = line == 0 ? Line::strong : Line::none;
-        for (std::uint32_t column = 0; column < head_columns + layout_.cell_columns; ++column) {
-            pen_.sheet().blank(pen_.at(column), pen_.style(style));
-        }
-        if (line == 0) pen_.sheet().text(pen_.at(0), "Load class", pen_.style(style));
+        rule(style);
+        const xlsx::StyleId id = pen_.style(style);
+        if (line == 0) pen_.sheet().text(pen_.at(0), "Load class", id);
         for (std::size_t group = 0; group < names.size(); ++group) {
-            const xlsx::At at = pen_.at(column_of(layout_.groups[group].first));
-            style.indent = 1;
-            if (line < names[group].size()) {
-                pen_.sheet().text(at, names[group][line], head_id(style, true));
-            } else {
-                pen_.sheet().blank(at, head_id(style, true));
-            }
+            if (line >= names[group].size()) continue;
+            pen_.sheet().text(pen_.at(column_of(layout_.groups[group].first)), names[group][line], id);
         }
         pen_.end_row(13.0);
     }
 
-    template <class Value> void head_numbers(const char* name, Value value, const char* format, Line bottom) {
+    template <class Value> void head_numbers(const char* name, Value value, const char* format) {
         xlsx::Style style = head_style;
-        style.borders.bottom = bottom;
         pen_.sheet().text(pen_.at(0), name, pen_.style(style));
-        pen_.sheet().blank(pen_.at(1), pen_.style(style));
         style.align = xlsx::Align::centre;
         style.number_format = format;
+        const xlsx::StyleId id = pen_.style(style);
         for (std::size_t c = part_->first; c < part_->last; ++c) {
-            pen_.sheet().number(pen_.at(column_of(c)), value(table_->columns[c]), head_id(style, starts_group(c)));
+            pen_.sheet().number(pen_.at(column_of(c)), value(table_->columns[c]), id);
         }
         pen_.end_row(13.0);
     }
@@ -206,12 +192,11 @@ private:
         pen_.sheet().text(pen_.at(1), second_head(*table_), pen_.style(style));
         style.align = xlsx::Align::centre;
         style.bold = false;
+        const xlsx::StyleId id = pen_.style(style);
         const std::string unit = kind_->shows_text     ? "section"
                                  : kind_->unit.empty() ? "ratio"
                                                        : std::string(kind_->unit);
-        for (std::size_t c = part_->first; c < part_->last; ++c) {
-            pen_.sheet().text(pen_.at(column_of(c)), unit, head_id(style, starts_group(c)));
-        }
+        for (const std::uint32_t column : layout_.cell_columns) pen_.sheet().text(pen_.at(column), unit, id);
         pen_.end_row(13.0);
     }
 
@@ -222,19 +207,16 @@ private:
         xlsx::Style without = cell_style(std::nullopt, format);
         without.number_format.clear();
         without.borders.bottom = Line::fine;
-        const std::array without_value{head_id(without, false), head_id(without, true)};
+        const xlsx::StyleId without_value = pen_.style(without);
         const xlsx::StyleId head = pen_.style(row_head_style);
-        std::vector<bool> starts;
-        for (std::size_t c = part_->first; c < part_->last; ++c) starts.push_back(starts_group(c));
         for (std::size_t row = 0; row < table_->rows.size(); ++row) {
             row_heads(table_->rows[row], head);
             for (std::size_t c = part_->first; c < part_->last; ++c) {
-                const bool start = starts[c - part_->first];
                 const Cell& cell = table_->at(row, c);
                 if (cell.value) {
-                    value(pen_.at(column_of(c)), cell, styles.of(cell.governing, start));
+                    value(pen_.at(column_of(c)), cell, styles.of(cell.governing));
                 } else {
-                    pen_.sheet().text(pen_.at(column_of(c)), reason_mark(cell), without_value[start ? 1 : 0]);
+                    pen_.sheet().text(pen_.at(column_of(c)), reason_mark(cell), without_value);
                 }
             }
             pen_.end_row(15.0);
@@ -245,10 +227,7 @@ private:
     void closing_line() {
         xlsx::Style line;
         line.borders.top = Line::strong;
-        const xlsx::StyleId id = pen_.style(line);
-        for (std::uint32_t column = 0; column < head_columns + layout_.cell_columns; ++column) {
-            pen_.sheet().blank(pen_.at(column), id);
-        }
+        rule(line);
         pen_.end_row(4.0);
     }
 

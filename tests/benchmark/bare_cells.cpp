@@ -23,8 +23,7 @@ void put(std::ostream& out, const std::string& text) {
 
 void put(std::ostream& out, const std::vector<std::string>& texts) {
     put(out, texts.size());
-    for (const std::string& text : texts)
-        put(out, text);
+    for (const std::string& text : texts) put(out, text);
 }
 
 std::size_t get_count(std::istream& in) {
@@ -41,8 +40,7 @@ template <class Sequence> void get(std::istream& in, Sequence& values) {
 
 void get(std::istream& in, std::vector<std::string>& texts) {
     texts.resize(get_count(in));
-    for (std::string& text : texts)
-        get(in, text);
+    for (std::string& text : texts) get(in, text);
 }
 
 } // namespace

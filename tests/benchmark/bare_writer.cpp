@@ -76,8 +76,7 @@ void write_sheet(lxw_workbook* workbook, const Formats& formats, const BareSheet
 bool write_workbook(const std::vector<BareSheet>& sheets, const char* file) {
     lxw_workbook* workbook = workbook_new(file);
     const Formats formats = cell_formats(workbook);
-    for (const BareSheet& sheet : sheets)
-        write_sheet(workbook, formats, sheet);
+    for (const BareSheet& sheet : sheets) write_sheet(workbook, formats, sheet);
     return workbook_close(workbook) == LXW_NO_ERROR;
 }
 
@@ -85,11 +84,9 @@ bool write_workbook(const std::vector<BareSheet>& sheets, const char* file) {
 
 /// bare_writer CELLS WORKBOOK: prints the wall and processor seconds of the writing, reading the cells not included.
 int main(int argc, char** argv) {
-    if (argc != 3)
-        return 2;
+    if (argc != 3) return 2;
     const auto sheets = spanledger::benchmark::read_bare_sheets(argv[1]);
-    if (sheets.empty())
-        return 2;
+    if (sheets.empty()) return 2;
     bool written = false;
     const auto sample = spanledger::benchmark::timed([&] { written = write_workbook(sheets, argv[2]); });
     fmt::print("{} {}\n", sample.wall, sample.processor);

@@ -13,8 +13,7 @@ namespace {
 
 [[noreturn]] void become(const std::vector<std::string>& command, int output) {
     std::vector<char*> arguments;
-    for (const std::string& argument : command)
-        arguments.push_back(const_cast<char*>(argument.c_str()));
+    for (const std::string& argument : command) arguments.push_back(const_cast<char*>(argument.c_str()));
     arguments.push_back(nullptr);
     dup2(output, STDOUT_FILENO);
     execv(arguments.front(), arguments.data());
@@ -35,8 +34,7 @@ std::string read_all(int from) {
 
 Run launch(const std::vector<std::string>& command) {
     std::array<int, 2> ends{};
-    if (pipe(ends.data()) != 0)
-        return {};
+    if (pipe(ends.data()) != 0) return {};
     const pid_t child = fork();
     if (child == 0) {
         close(ends[0]);
@@ -48,8 +46,7 @@ Run launch(const std::vector<std::string>& command) {
     int status = 0;
     rusage used{};
     Run run;
-    if (child < 0 || wait4(child, &status, 0, &used) != child)
-        return run;
+    if (child < 0 || wait4(child, &status, 0, &used) != child) return run;
     run.peak_mib = static_cast<double>(used.ru_maxrss) / 1024.0;
     run.succeeded = WIFEXITED(status) && WEXITSTATUS(status) == 0 && printed >> run.sample.wall >> run.sample.processor;
     return run;

@@ -28,14 +28,11 @@ std::string load_text(std::size_t i) {
 
 std::string table_text(const PracticeSize& size) {
     std::string members;
-    for (const char* name : classes)
-        members += fmt::format("\"{}\", ", name);
+    for (const char* name : classes) members += fmt::format("\"{}\", ", name);
     std::string loads;
-    for (std::size_t i = 0; i < size.loads; ++i)
-        loads += fmt::format("\"load {}\", ", i + 1);
+    for (std::size_t i = 0; i < size.loads; ++i) loads += fmt::format("\"load {}\", ", i + 1);
     std::string spacings;
-    for (std::size_t i = 0; i < size.spacings; ++i)
-        spacings += fmt::format("{}, ", 300 + 50 * i);
+    for (std::size_t i = 0; i < size.spacings; ++i) spacings += fmt::format("{}, ", 300 + 50 * i);
     return fmt::format("[[table]]\nname = \"Spans\"\nkind = \"permissible span\"\nmembers = [{}]\nloads = [{}]\n"
                        "spacings_mm = [{}]\n",
                        members, loads, spacings);
@@ -56,8 +53,7 @@ std::string brief_text(const PracticeSize& size, BriefKind kind) {
                                    "[support]\ncompression_edge = \"{}\"\n\n[deck]\nstiffness_Nmm2_per_m = 2.0e9\n\n",
                                    kind == BriefKind::free_edge ? "free" : "held");
     text += limits_text(kind) + "\n";
-    for (std::size_t i = 0; i < size.loads; ++i)
-        text += load_text(i);
+    for (std::size_t i = 0; i < size.loads; ++i) text += load_text(i);
     for (const char* name : classes) {
         text += fmt::format("[[members]]\nname = \"{0}\"\nclass = \"{0}\"\nseries = \"benchmark\"\n\n", name);
     }

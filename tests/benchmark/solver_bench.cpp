@@ -64,10 +64,8 @@ Work work_of(const Inputs& inputs) {
 
 LimitOutcome bisected(const Row& row, const Joist& joist, Limit limit, double cap) {
     const auto exceeded = [&](double L) { return worst_check(*row.rules, joist, limit, L).utilisation > cap; };
-    if (exceeded(row.range.lower))
-        return {.kind = LimitOutcome::Kind::fails_at_once, .clear_span = 0.0};
-    if (!exceeded(row.range.upper))
-        return {.kind = LimitOutcome::Kind::never_reached, .clear_span = 0.0};
+    if (exceeded(row.range.lower)) return {.kind = LimitOutcome::Kind::fails_at_once, .clear_span = 0.0};
+    if (!exceeded(row.range.upper)) return {.kind = LimitOutcome::Kind::never_reached, .clear_span = 0.0};
     SpanRange bracket = row.range;
     for (int step = 0; step < bisection_steps; ++step) {
         const double middle = 0.5 * (bracket.lower + bracket.upper);
@@ -83,8 +81,7 @@ std::vector<Outcomes> by_bisection(const Work& work) {
             Outcomes& outcomes = all.emplace_back();
             for (const LimitDefinition& definition : limit_definitions) {
                 const LimitPlan& plan = row.rules->plan(definition.limit);
-                if (plan.status != LimitStatus::checked)
-                    continue;
+                if (plan.status != LimitStatus::checked) continue;
                 outcomes[index_of(definition.limit)] = bisected(row, *joist, definition.limit, cap_of(plan, work.cap));
             }
         }
@@ -96,8 +93,7 @@ std::vector<Outcomes> by_solver(const Work& work) {
     std::vector<Outcomes> all;
     for (const Row& row : work.rows) {
         const SpanSolver solver(*row.rules, row.range, work.spacings, work.cap);
-        for (const auto& joist : row.joists)
-            solver.solve(*joist, all.emplace_back());
+        for (const auto& joist : row.joists) solver.solve(*joist, all.emplace_back());
     }
     return all;
 }
@@ -108,11 +104,9 @@ bool agree(const Row& row, const Joist& joist, Limit limit, const LimitOutcome& 
            double cap) {
     const double resolution = std::ldexp(row.range.upper - row.range.lower, -bisection_steps) * 1.01;
     if (solved.kind == bisected.kind) {
-        if (std::abs(solved.clear_span - bisected.clear_span) <= resolution)
-            return true;
+        if (std::abs(solved.clear_span - bisected.clear_span) <= resolution) return true;
     }
-    if (solved.kind != LimitOutcome::Kind::spans)
-        return false;
+    if (solved.kind != LimitOutcome::Kind::spans) return false;
     const auto u = [&](double L) { return worst_check(*row.rules, joist, limit, L).utilisation; };
     return u(solved.clear_span) <= cap * (1.0 + 1e-12) && u(solved.clear_span + resolution) > cap;
 }
@@ -125,8 +119,7 @@ std::size_t differences(const Work& work, const std::vector<Outcomes>& solved, c
             for (std::size_t i = 0; i < limit_count; ++i) {
                 const Limit limit = limit_definitions[i].limit;
                 const double cap = cap_of(row.rules->plan(limit), work.cap);
-                if (!agree(row, *joist, limit, solved[at][i], bisected[at][i], cap))
-                    ++count;
+                if (!agree(row, *joist, limit, solved[at][i], bisected[at][i], cap)) ++count;
             }
             ++at;
         }
@@ -144,8 +137,7 @@ bool compare(const std::string& folder, const Case& brief, std::size_t quads) {
     const std::string file = benchmark::write_practice(folder, {.sizes = 70, .loads = 3, .spacings = 3}, brief.kind);
     const auto inputs = read_inputs(file, diagnostics);
     report(diagnostics, std::cerr);
-    if (!inputs)
-        return false;
+    if (!inputs) return false;
     const Work work = work_of(*inputs);
     const std::size_t different = differences(work, by_solver(work), by_bisection(work));
     if (different > 0) {
@@ -167,8 +159,7 @@ int main(int argc, char** argv) {
     using benchmark::BriefKind;
     const std::size_t quads = argc > 1 ? std::strtoul(argv[1], nullptr, 10) : 25;
     std::string folder = (std::filesystem::temp_directory_path() / "spanledger-solver-XXXXXX").string();
-    if (quads == 0 || mkdtemp(folder.data()) == nullptr)
-        return 2;
+    if (quads == 0 || mkdtemp(folder.data()) == nullptr) return 2;
     bool well = true;
     for (const Case& brief :
          {Case{BriefKind::without_vibration, "without vibration"}, Case{BriefKind::with_vibration, "with vibration"},

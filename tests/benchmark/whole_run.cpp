@@ -27,8 +27,7 @@ std::optional<Issue> swept(const std::string& brief) {
     Diagnostics diagnostics;
     const std::optional<Inputs> inputs = read_inputs(brief, diagnostics);
     report(diagnostics, std::cerr);
-    if (!inputs)
-        return std::nullopt;
+    if (!inputs) return std::nullopt;
     return issue_tables(*inputs);
 }
 
@@ -56,8 +55,7 @@ benchmark::BareSheet bare_sheet(const TablePart& part, std::size_t number) {
 bool prepare(const std::string& folder, const std::string& cells) {
     const auto size = cells == "million" ? benchmark::million_cells : benchmark::ten_thousand_cells;
     const auto issue = swept(benchmark::write_practice(folder, size, benchmark::BriefKind::with_vibration));
-    if (!issue)
-        return false;
+    if (!issue) return false;
     std::vector<benchmark::BareSheet> sheets;
     for (std::size_t i = 0; i < issue->tables.size(); ++i) {
         for (const TablePart& part : parts_of(issue->tables[i], i + 1, issue->brief.search)) {
@@ -88,19 +86,14 @@ bool all_files_written(const std::string& brief, const std::string& folder) {
 /// Each prints its wall and processor seconds.
 int main(int argc, char** argv) {
     const std::vector<std::string> words(argv + 1, argv + argc);
-    if (words.size() < 2)
-        return 2;
+    if (words.size() < 2) return 2;
     const std::string last = words.back();
     bool well = false;
     const auto sample = benchmark::timed([&] {
-        if (words[0] == "prepare")
-            well = prepare(words[1], last);
-        if (words[0] == "sweep")
-            well = swept_only(words[1]);
-        if (words[0] == "workbook")
-            well = workbook_written(words[1], last);
-        if (words[0] == "all")
-            well = all_files_written(words[1], last);
+        if (words[0] == "prepare") well = prepare(words[1], last);
+        if (words[0] == "sweep") well = swept_only(words[1]);
+        if (words[0] == "workbook") well = workbook_written(words[1], last);
+        if (words[0] == "all") well = all_files_written(words[1], last);
     });
     fmt::print("{} {}\n", sample.wall, sample.processor);
     return well ? 0 : 1;

@@ -8,6 +8,7 @@
 #include <cstdlib>
 #include <filesystem>
 #include <functional>
+#include <stdexcept>
 #include <string>
 #include <vector>
 
@@ -50,10 +51,7 @@ bool same_cells(const Bench& bench) {
 std::function<benchmark::Sample()> work(const std::vector<std::string>& command, double& peak_mib) {
     return [&peak_mib, command] {
         const benchmark::Run run = benchmark::launch(command);
-        if (!run.succeeded) {
-            fmt::print(stderr, "{} {} did not succeed\n", command[0], command[1]);
-            std::exit(1);
-        }
+        if (!run.succeeded) throw std::runtime_error(fmt::format("{} {} did not succeed", command[0], command[1]));
         peak_mib = std::max(peak_mib, run.peak_mib);
         return run.sample;
     };
@@ -96,13 +94,16 @@ int main(int argc, char** argv) {
         return argc > at ? std::strtoul(argv[at], nullptr, 10) : otherwise;
     };
     std::string folder = (std::filesystem::temp_directory_path() / "spanledger-whole-run-XXXXXX").string();
-    if (mkdtemp(folder.data()) == nullptr)
-        return 2;
+    if (mkdtemp(folder.data()) == nullptr) return 2;
     const Bench bench{.programs = std::filesystem::canonical(argv[0]).parent_path().string(), .folder = folder};
     bool well = true;
-    for (const Case& size : {Case{"ten-thousand", number(1, 25)}, Case{"million", number(2, 7)}}) {
-        if (size.quads > 0)
-            well = compare(bench, size) && well;
+    try {
+        for (const Case& size : {Case{"ten-thousand", number(1, 25)}, Case{"million", number(2, 7)}}) {
+            if (size.quads > 0) well = compare(bench, size) && well;
+        }
+    } catch (const std::runtime_error& failure) {
+        fmt::print(stderr, "{}\n", failure.what());
+        well = false;
     }
     std::filesystem::remove_all(folder);
     return well ? 0 : 1;

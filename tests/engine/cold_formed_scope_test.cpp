@@ -1,10 +1,11 @@
 // SPDX-License-Identifier: MIT
 #include "spanledger/catalogue.hpp"
+#include "spanledger/engine/basis_statement.hpp"
 #include "spanledger/engine/cold_formed_rules.hpp"
 
 #include <catch2/catch.hpp>
 
-#include <cmath>
+#include <algorithm>
 #include <string>
 #include <vector>
 
@@ -179,4 +180,37 @@ TEST_CASE("the bearing length needed is where the reaction meets its resistance"
     double worst = 0.0;
     for (const Check<double>& check : checks) worst = std::max(worst, utilisation(check));
     CHECK(worst == Approx(1.0).epsilon(1e-12));
+}
+
+TEST_CASE("the basis tells of channels where the brief has some, and of their sources", "[cold-formed]") {
+    const auto brief = [](const std::string& members) {
+        return "[practice]\nname = \"p\"\nnumber = \"n\"\nrevision = \"A\"\ntitle = \"t\"\n[support]\ncompression_edge = "
+               "\"held\"\n[[load]]\nname = \"floor\"\ncategory = \"A\"\npermanent_kN_m2 = 0.5\nvariable_kN_m2 = 1.5\n"
+               "[[members]]\nname = \"joists\"\n" +
+               members +
+               "\n[[table]]\nname = \"spans\"\nkind = \"permissible span\"\nmembers = [\"joists\"]\nspacings_mm = "
+               "[400]\nloads = [\"floor\"]\n";
+    };
+    const auto count = [&](const std::string& members) {
+        Diagnostics diagnostics;
+        const auto inputs = read_inputs_from_text("brief.toml", brief(members), diagnostics);
+        REQUIRE(inputs.has_value());
+        const auto lines = basis_lines(*inputs);
+        return std::count_if(lines.begin(), lines.end(),
+                             [](const BasisLine& line) { return line.heading == "Cold-formed channels"; });
+    };
+    CHECK(count("class = \"C24\"\nsizes = [\"47x220\"]") == 0);
+    CHECK(count("class = \"S350GD\"\nseries = \"C 200\"") > 10);
+
+    Diagnostics diagnostics;
+    const auto inputs =
+        read_inputs_from_text("brief.toml", brief("class = \"S350GD\"\nseries = \"C 200\""), diagnostics);
+    const auto sources = source_lines(*inputs);
+    const auto has = [&](const std::string& kind, const std::string& item) {
+        return std::any_of(sources.begin(), sources.end(), [&](const SourceLine& line) {
+            return line.kind == kind && line.item == item && !line.source.empty() && !line.seen;
+        });
+    };
+    CHECK(has("steel grade", "S350GD"));
+    CHECK(has("section", "C 200x65x20x2 r2.5"));
 }

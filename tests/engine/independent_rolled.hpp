@@ -60,7 +60,8 @@ inline Properties properties(const Section& s) {
     const double hw = s.h - 2 * s.tf;
     const double piece = s.r * s.r - pi * s.r * s.r / 4;
     // Centroid of the piece from its corner: first moments of square and quarter circle.
-    const double to_corner = s.r == 0 ? 0 : (s.r * s.r * s.r / 2 - pi * s.r * s.r / 4 * (s.r - 4 * s.r / (3 * pi))) / piece;
+    const double to_corner =
+        s.r == 0 ? 0 : (s.r * s.r * s.r / 2 - pi * s.r * s.r / 4 * (s.r - 4 * s.r / (3 * pi))) / piece;
     const double about_edge = std::pow(s.r, 4) / 3 - (std::pow(s.r, 4) * (pi / 16 - 4 / (9 * pi)) +
                                                       pi * s.r * s.r / 4 * std::pow(s.r - 4 * s.r / (3 * pi), 2));
     const double own = about_edge - piece * to_corner * to_corner;
@@ -81,8 +82,12 @@ inline Properties properties(const Section& s) {
     return p;
 }
 
-inline double fy(const Case& c) { return std::max(c.section.tw, c.section.tf) <= 16 ? c.fy16 : c.fy40; }
-inline double eps(const Case& c) { return std::sqrt(235 / fy(c)); }
+inline double fy(const Case& c) {
+    return std::max(c.section.tw, c.section.tf) <= 16 ? c.fy16 : c.fy40;
+}
+inline double eps(const Case& c) {
+    return std::sqrt(235 / fy(c));
+}
 
 inline int part_class(double ct, double e, double one, double two, double three) {
     if (ct <= one * e) return 1;
@@ -126,8 +131,12 @@ struct Combination {
 inline double self_weight(const Case& c) {
     return c.self_weight ? 7850 * 9.81 * properties(c.section).A * 1e-9 : 0.0;
 }
-inline double permanent(const Case& c) { return (c.loads.g + c.loads.g_partitions) * c.spacing + self_weight(c); }
-inline bool has_uniform(const Case& c) { return c.loads.q > 0 || c.loads.partitions > 0; }
+inline double permanent(const Case& c) {
+    return (c.loads.g + c.loads.g_partitions) * c.spacing + self_weight(c);
+}
+inline bool has_uniform(const Case& c) {
+    return c.loads.q > 0 || c.loads.partitions > 0;
+}
 
 inline std::vector<Combination> combinations(const Case& c) {
     const double g = permanent(c);
@@ -290,7 +299,9 @@ inline std::optional<double> deflection_limit(const Case& c, double L, bool with
     return with_permanent ? L / 250 : L / 360;
 }
 
-inline bool refused(const Case& c) { return section_class(c) == 4; }
+inline bool refused(const Case& c) {
+    return section_class(c) == 4;
+}
 
 inline bool active(const Case& c, Limit limit) {
     if (refused(c)) return false;

@@ -91,7 +91,9 @@ inline Case random_joist(Random& r) {
     return c;
 }
 
-inline double span_addition(const Case& c) { return c.cantilever ? c.bearing / 2 : c.bearing; }
+inline double span_addition(const Case& c) {
+    return c.cantilever ? c.bearing / 2 : c.bearing;
+}
 
 inline std::string describe(const Case& c) {
     std::ostringstream out;
@@ -100,10 +102,10 @@ inline std::string describe(const Case& c) {
     const Loads& l = c.loads;
     out << (s.channel ? "channel " : "I ") << s.h << " " << s.b << " " << s.tw << " " << s.tf << " " << s.r << " fy "
         << c.fy16 << " " << c.fy40 << " gM " << c.gM0 << " " << c.gM1 << " eta " << c.eta << " general " << c.general
-        << " uk " << c.uk << " a/b " << c.a_and_b << " spacing " << c.spacing << " bearing " << c.bearing << " g " << l.g
-        << " " << l.g_partitions << " q " << l.q << " " << l.partitions << " snow " << l.snow << " Q " << l.Q << " share "
-        << l.share << " cantilever " << c.cantilever << " held " << c.held << " restraint " << c.restraint.value_or(0)
-        << " height " << z_g(c) << " cap " << c.cap;
+        << " uk " << c.uk << " a/b " << c.a_and_b << " spacing " << c.spacing << " bearing " << c.bearing << " g "
+        << l.g << " " << l.g_partitions << " q " << l.q << " " << l.partitions << " snow " << l.snow << " Q " << l.Q
+        << " share " << l.share << " cantilever " << c.cantilever << " held " << c.held << " restraint "
+        << c.restraint.value_or(0) << " height " << z_g(c) << " cap " << c.cap;
     return out.str();
 }
 
@@ -170,7 +172,8 @@ inline spanledger::LoadClass engine_load(const Loads& l) {
     return load;
 }
 
-inline std::optional<spanledger::DeflectionLimit> engine_limit(std::optional<double> ratio, std::optional<double> length) {
+inline std::optional<spanledger::DeflectionLimit> engine_limit(std::optional<double> ratio,
+                                                               std::optional<double> length) {
     if (!ratio && !length) return std::nullopt;
     return spanledger::DeflectionLimit{ratio, length};
 }

@@ -15,7 +15,9 @@ namespace {
 
 constexpr std::uint64_t seed = 1993;
 
-bool same(double a, double b) { return std::abs(a - b) <= 1e-12 * std::max(std::abs(a), std::abs(b)) + 1e-15; }
+bool same(double a, double b) {
+    return std::abs(a - b) <= 1e-12 * std::max(std::abs(a), std::abs(b)) + 1e-15;
+}
 
 } // namespace
 

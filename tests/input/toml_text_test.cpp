@@ -143,7 +143,7 @@ TEST_CASE("Deep nesting and endless keys are refused, not followed") {
     CHECK_FALSE(problems_of("x = [0.5, 1.5]\ny = \"........\"\n").has_errors());
 }
 
-TEST_CASE("Invalid UTF-8 is refused at its place") {
+TEST_CASE("A brief that is not UTF-8 is refused at its place") {
     Diagnostics diagnostics;
     CHECK_FALSE(accept_text("t.toml", "a = 1\nö = \"\xFC\"\n", diagnostics).has_value());
     REQUIRE(diagnostics.all().size() == 1);

@@ -51,12 +51,10 @@ numeric::Matrix coupling(const Diagram& diagram) {
 
 bool positive_definite(numeric::Matrix A) {
     for (std::size_t k = 0; k < A.size(); ++k) {
-        if (A[k][k] <= 0.0)
-            return false;
+        if (A[k][k] <= 0.0) return false;
         for (std::size_t i = k + 1; i < A.size(); ++i) {
             const double factor = A[i][k] / A[k][k];
-            for (std::size_t j = k; j < A.size(); ++j)
-                A[i][j] -= factor * A[k][j];
+            for (std::size_t j = k; j < A.size(); ++j) A[i][j] -= factor * A[k][j];
         }
     }
     return true;
@@ -145,12 +143,9 @@ TEST_CASE("M_cr under a force at mid-span is the lowest eigenvalue within 1.2 %,
     for (const Case& c : cases()) {
         const double numerical = numerical_critical_moment(c.joist, force_at_midspan);
         INFO("h " << c.h << ", L " << c.joist.L << ", z_g " << c.joist.z_g);
-        if (c.joist.z_g == 0.0)
-            CHECK(force(c.joist) == Approx(numerical).epsilon(0.012));
-        if (c.joist.z_g > 0.0)
-            CHECK(force(c.joist) < numerical);
-        if (c.joist.z_g > 0.0)
-            CHECK(force(c.joist) > 0.93 * numerical);
+        if (c.joist.z_g == 0.0) CHECK(force(c.joist) == Approx(numerical).epsilon(0.012));
+        if (c.joist.z_g > 0.0) CHECK(force(c.joist) < numerical);
+        if (c.joist.z_g > 0.0) CHECK(force(c.joist) > 0.93 * numerical);
     }
 }
 

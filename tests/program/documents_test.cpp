@@ -84,23 +84,48 @@ TEST_CASE("bash offers every command and every option", "[program]") {
     CHECK_THAT(offered("spanledger ch", 1), Contains(" check ") && !Contains("tables"));
     for_every_option([&](const CommandRow& row, const OptionRow& option) {
         INFO(row.name << " --" << option.name);
-        const std::string options = offered("spanledger " + std::string(row.name) + " --" + std::string(option.name), 2);
+        const std::string options =
+            offered("spanledger " + std::string(row.name) + " --" + std::string(option.name), 2);
         CHECK_THAT(options, Contains(" --" + std::string(option.name) + " "));
     });
 }
 
-TEST_CASE("zsh and fish are told of every command and every option", "[program]") {
-    const std::string zsh = printed("zsh");
-    const std::string fish = printed("fish");
-    for (const CommandRow& row : command_table()) {
-        CHECK_THAT(zsh, Contains("'" + std::string(row.name) + ":"));
-        CHECK_THAT(fish, Contains("-a " + std::string(row.name) + " "));
+/// The lines that hold all of the words.
+std::size_t lines_with(const std::string& text, const std::vector<std::string>& words) {
+    std::istringstream lines(text);
+    std::size_t count = 0;
+    for (std::string line; std::getline(lines, line);) {
+        const auto held = [&](const std::string& word) { return line.find(word) != std::string::npos; };
+        count += std::all_of(words.begin(), words.end(), held) ? 1U : 0U;
     }
+    return count;
+}
+
+TEST_CASE("zsh is told of every command and every option", "[program]") {
+    const std::string zsh = printed("zsh");
+    for (const CommandRow& row : command_table()) {
+        CHECK(lines_with(zsh, {"'" + std::string(row.name) + ":"}) == 1);
+        const std::size_t begins = zsh.find("        " + std::string(row.name) + ")\n");
+        REQUIRE(begins != std::string::npos);
+        const std::string block = zsh.substr(begins, zsh.find(";;", begins) - begins);
+        for (const auto rows : {row.options, general_options()}) {
+            for (const OptionRow& option : rows) {
+                INFO(row.name << " --" << option.name);
+                const std::string letter = option.letter == '\0' ? "--" : std::string("-") + option.letter + ",--";
+                CHECK(lines_with(block, {letter + std::string(option.name)}) == 1);
+            }
+        }
+    }
+}
+
+TEST_CASE("fish is told of every command and every option", "[program]") {
+    const std::string fish = printed("fish");
+    for (const CommandRow& row : command_table())
+        CHECK(lines_with(fish, {"-a " + std::string(row.name) + " -d "}) == 1);
     for_every_option([&](const CommandRow& row, const OptionRow& option) {
         INFO(row.name << " --" << option.name);
-        CHECK_THAT(zsh, Contains("'--" + std::string(option.name) + "["));
-        CHECK_THAT(fish, Contains("__fish_seen_subcommand_from " + std::string(row.name) + "' -l " +
-                                  std::string(option.name) + " "));
+        CHECK(lines_with(fish, {" -n '__fish_seen_subcommand_from " + std::string(row.name) + "' ",
+                                " -l " + std::string(option.name) + " "}) == 1);
     });
 }
 

@@ -72,12 +72,9 @@ TEST_CASE("examples of the help run as printed in the folder that start filled",
 
 TEST_CASE("--help anywhere shows help", "[program]") {
     const std::string of_tables = run_inside({"tables", "--help"}).out;
-    const std::vector<Arguments> places{{"--help", "tables"},
-                                        {"tables", "none.toml", "--help"},
-                                        {"tables", "--out", "x", "-h"},
-                                        {"tables", "a", "b", "c", "--help"},
-                                        {"tables", "--out", "--help"},
-                                        {"tables", "--unknown", "--help"}};
+    const std::vector<Arguments> places{{"--help", "tables"},           {"tables", "none.toml", "--help"},
+                                        {"tables", "--out", "x", "-h"}, {"tables", "a", "b", "c", "--help"},
+                                        {"tables", "--out", "--help"},  {"tables", "--unknown", "--help"}};
     for (const Arguments& arguments : places) {
         INFO(Catch::StringMaker<Arguments>::convert(arguments));
         const Outcome outcome = run_inside(arguments);

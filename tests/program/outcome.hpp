@@ -63,8 +63,8 @@ public:
     [[nodiscard]] Arguments tables() const { return {"tables", brief(), "--out", out()}; }
     [[nodiscard]] Arguments replacing_tables() const { return {"tables", brief(), "--out", out(), "--replace"}; }
     [[nodiscard]] Arguments check(const std::string& clear_span) const {
-        return {"check",  brief(),           "--member",     "C24 47x220", "--spacing", "400",
-                "--load", "Dwelling, G 0.50", "--clear-span", clear_span};
+        return {"check", brief(),  "--member",         "C24 47x220",   "--spacing",
+                "400",   "--load", "Dwelling, G 0.50", "--clear-span", clear_span};
     }
 
 private:

@@ -46,12 +46,10 @@ TEST_CASE("the record of an issue parses", "[program]") {
 
 TEST_CASE("standard output is empty where there is an error", "[program]") {
     const StartedFolder folder;
-    const std::vector<Arguments> wrong{{"check", folder.brief(), "--json"},
-                                       with(with(folder.check("nan"), "--json"), "--verbose"),
-                                       {"tables", folder.path() + "/none.toml"},
-                                       {"catalogue", "nothing", "--json"},
-                                       {"catalogue", "classes", "none", "--json"},
-                                       {"catalogue", "--brief", folder.path() + "/none.toml", "--json"}};
+    const std::vector<Arguments> wrong{
+        {"check", folder.brief(), "--json"},        with(with(folder.check("nan"), "--json"), "--verbose"),
+        {"tables", folder.path() + "/none.toml"},   {"catalogue", "nothing", "--json"},
+        {"catalogue", "classes", "none", "--json"}, {"catalogue", "--brief", folder.path() + "/none.toml", "--json"}};
     for (const Arguments& arguments : wrong) {
         INFO(Catch::StringMaker<Arguments>::convert(arguments));
         const Outcome outcome = run_inside(arguments);
@@ -70,8 +68,8 @@ TEST_CASE("no escape codes and no progress where nothing is a terminal", "[progr
                                       folder.check("4.2 m"),
                                       folder.check("6 m"),
                                       {"tables", folder.path() + "/none.toml"}};
-    for (const auto& [name, value] :
-         std::vector<std::pair<std::string, std::string>>{{"TERM", "xterm-256color"}, {"NO_COLOR", "1"}, {"TERM", "dumb"}}) {
+    for (const auto& [name, value] : std::vector<std::pair<std::string, std::string>>{
+             {"TERM", "xterm-256color"}, {"NO_COLOR", "1"}, {"TERM", "dumb"}}) {
         for (const Arguments& arguments : runs) {
             INFO(Catch::StringMaker<Arguments>::convert(arguments));
             const Outcome outcome = run_apart({.arguments = arguments, .environment = {{name, value}}});

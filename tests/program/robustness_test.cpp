@@ -56,7 +56,8 @@ TEST_CASE("signals that ask to stop: status 130 and nothing left lying about", "
     const std::string temporary = folder.path() + "/temporary";
     std::filesystem::create_directory(temporary);
     for (const int number : {SIGINT, SIGTERM}) {
-        Subprocess process({.arguments = {"tables", "-", "--out", folder.out()}, .environment = {{"TMPDIR", temporary}}});
+        Subprocess process(
+            {.arguments = {"tables", "-", "--out", folder.out()}, .environment = {{"TMPDIR", temporary}}});
         process.feed(more_than_a_pipe_holds());
         process.signal(number);
         process.feed(file_text(folder.brief()));

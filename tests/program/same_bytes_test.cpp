@@ -65,8 +65,8 @@ TEST_CASE("the same text of a check in any locale", "[program]") {
     make_comma_locale(locales);
     for (const Arguments& arguments : {folder.check("4.2 m"), with(folder.check("4.2 m"), "--json"), {"catalogue"}}) {
         const Outcome plain = run_apart({.arguments = arguments});
-        const Outcome comma = run_apart(
-            {.arguments = arguments, .environment = {{"LOCPATH", locales}, {"LC_ALL", "de_DE.UTF-8"}}});
+        const Outcome comma =
+            run_apart({.arguments = arguments, .environment = {{"LOCPATH", locales}, {"LC_ALL", "de_DE.UTF-8"}}});
         CHECK(plain.status == 0);
         CHECK(comma.out == plain.out);
         CHECK(comma.err == plain.err);

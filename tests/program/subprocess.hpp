@@ -19,17 +19,18 @@ namespace spanledger {
 struct Launch {
     Arguments arguments;
     std::string program = SPANLEDGER_PROGRAM;
-    std::string folder = "."; ///< where it runs
+    std::string folder = ".";                                          ///< where it runs
     std::vector<std::pair<std::string, std::string>> environment = {}; ///< set on top of the test's own
     std::optional<rlim_t> file_size = {}; ///< greatest size of a file it may write, in bytes
-    std::string out = {}; ///< file that takes standard output; a scratch file where empty
+    std::string out = {};                 ///< device that takes standard output, which is then not read back
 };
 
 /// A program in a process of its own. Its words go to scratch files, so that it never waits for the test to read them.
 class Subprocess {
 public:
     explicit Subprocess(const Launch& launch)
-        : out_(launch.out.empty() ? scratch() : ::open(launch.out.c_str(), O_RDWR | O_CLOEXEC)), err_(scratch()) {
+        : keeps_out_(launch.out.empty()),
+          out_(keeps_out_ ? scratch() : ::open(launch.out.c_str(), O_WRONLY | O_CLOEXEC)), err_(scratch()) {
         int ends[2];
         if (::pipe2(ends, O_CLOEXEC) != 0) throw std::runtime_error("no pipe");
         input_ = ends[1];
@@ -64,7 +65,7 @@ public:
         int status = 0;
         ::waitpid(child_, &status, 0);
         const int ended = WIFEXITED(status) ? WEXITSTATUS(status) : 128 + WTERMSIG(status);
-        return {ended, text_of(out_), text_of(err_)};
+        return {ended, keeps_out_ ? text_of(out_) : std::string(), text_of(err_)};
     }
 
 private:
@@ -102,6 +103,7 @@ private:
         }
     }
 
+    bool keeps_out_;
     int out_;
     int err_;
     int input_ = -1;

@@ -44,15 +44,16 @@ TEST_CASE("mistyped commands and options are refused with what was meant", "[pro
     check_refusal({{"catalog"}, "unknown command 'catalog'", "did you mean 'catalogue'?"});
     check_refusal({{""}, "unknown command ''", "known: start, tables, check, catalogue"});
     check_refusal({{"tables", "brief.toml", "--repalce"}, "unknown option '--repalce'", "did you mean '--replace'?"});
-    check_refusal({{"check", "brief.toml", "--mebmer", "C24 47x220"}, "unknown option '--mebmer'",
-                   "did you mean '--member'?"});
+    check_refusal(
+        {{"check", "brief.toml", "--mebmer", "C24 47x220"}, "unknown option '--mebmer'", "did you mean '--member'?"});
     check_refusal({{"catalogue", "clases"}, "unknown topic 'clases'", "did you mean 'classes'?"});
     check_refusal({{"catalogue", "classes", "C25"}, "nothing named 'C25' among the classes", "did you mean 'C2"});
     check_refusal({{"tables", "-x", "brief.toml"}, "unknown option '-x'", "--out"});
 }
 
 TEST_CASE("abbreviated options are refused", "[program]") {
-    check_refusal({{"check", "brief.toml", "--mem", "C24 47x220"}, "unknown option '--mem'", "did you mean '--member'?"});
+    check_refusal(
+        {{"check", "brief.toml", "--mem", "C24 47x220"}, "unknown option '--mem'", "did you mean '--member'?"});
     check_refusal({{"tables", "brief.toml", "--repl"}, "unknown option '--repl'", "hint"});
     check_refusal({{"tables", "brief.toml", "--verb"}, "unknown option '--verb'", "hint"});
     check_refusal({{"--vers"}, "unknown option '--vers'", "did you mean '--version'?"});
@@ -105,8 +106,8 @@ TEST_CASE("mistyped names in check are refused with what was meant", "[program]"
 TEST_CASE("option and argument may be written together", "[program]") {
     const StartedFolder folder;
     const Outcome apart = run_inside(folder.check("4.2 m"));
-    const Outcome together = run_inside({"check", folder.brief(), "--member=C24 47x220", "-s400",
-                                         "--load=Dwelling, G 0.50", "--clear-span=4.2 m"});
+    const Outcome together = run_inside(
+        {"check", folder.brief(), "--member=C24 47x220", "-s400", "--load=Dwelling, G 0.50", "--clear-span=4.2 m"});
     CHECK(apart.status == 0);
     CHECK(together.status == 0);
     CHECK(together.out == apart.out);

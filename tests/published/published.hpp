@@ -55,6 +55,7 @@ void check(const Example& example);
 [[nodiscard]] Example glulam_hall();
 [[nodiscard]] Example steel_floor_beam();
 [[nodiscard]] Example lateral_buckling_of_a_beam();
+[[nodiscard]] Example lipped_channel_section();
 [[nodiscard]] std::vector<Example> timber_parameters();
 [[nodiscard]] std::vector<Example> psi_factors();
 

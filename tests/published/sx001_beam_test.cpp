@@ -19,7 +19,9 @@ constexpr double L = 5700.0;
 constexpr double W_pl = 804300.0;
 constexpr en1993::LateralStiffness<double> stiffness{210000.0, 80770.0, 788.1e4, 281500.0, 199100e6};
 
-Row class_row(const char* part, double ours) { return {Mark::seen, part, "1", ours, "-"}; }
+Row class_row(const char* part, double ours) {
+    return {Mark::seen, part, "1", ours, "-"};
+}
 
 std::vector<Row> classification() {
     const double c_f = rolled_section::i_section::outstand(ipe_330);
@@ -28,10 +30,10 @@ std::vector<Row> classification() {
     return {
         {Mark::seen, "flange c", "58.25", c_f, "mm"},
         {Mark::seen, "flange c/t_f", "5.07", c_f / ipe_330.t_f, "-"},
-        class_row("class of the flange", en1993::part_class(c_f / ipe_330.t_f, eps, en1993::outstand_in_compression)),
+        class_row("class of the flange", en1993::flange_class(c_f / ipe_330.t_f, eps)),
         {Mark::seen, "web c", "271", c_w, "mm"},
         {Mark::seen, "web c/t_w", "36.1", c_w / ipe_330.t_w, "-"},
-        class_row("class of the web", en1993::part_class(c_w / ipe_330.t_w, eps, en1993::web_in_bending)),
+        class_row("class of the web", en1993::web_class(c_w / ipe_330.t_w, eps)),
     };
 }
 

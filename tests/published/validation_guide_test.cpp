@@ -136,7 +136,8 @@ namespace {
 
 std::vector<Example> all_examples() {
     std::vector<Example> all{beam_theory(),      combination_factors(),       lvl_floor(), din_floor(), glulam_hall(),
-                             steel_floor_beam(), lateral_buckling_of_a_beam()};
+                             steel_floor_beam(), lateral_buckling_of_a_beam(),
+                             lipped_channel_section()};
     for (auto& table : timber_parameters())
         all.push_back(std::move(table));
     for (auto& table : psi_factors())

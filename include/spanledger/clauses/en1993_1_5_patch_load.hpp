@@ -59,10 +59,10 @@ template <class N> N effective_edge_length(const PatchedWeb<N>& x, const PatchLo
 template <class N> N effective_loaded_length(const PatchedWeb<N>& x, const PatchLoad<N>& load) {
     const N m_1 = flange_parameter(x);
     const N l_e = effective_edge_length(x, load);
-    const N over_patch = named("l_y_1", "mm", "EN 1993-1-5 (6.10)",
-                               load.s_s + 2.0 * x.t_f * (1.0 + root(m_1 + load.m_2)));
-    const N at_edge = named("l_y_2", "mm", "EN 1993-1-5 (6.11)",
-                            l_e + x.t_f * root(m_1 / 2.0 + squared(l_e / x.t_f) + load.m_2));
+    const N over_patch =
+        named("l_y_1", "mm", "EN 1993-1-5 (6.10)", load.s_s + 2.0 * x.t_f * (1.0 + root(m_1 + load.m_2)));
+    const N at_edge =
+        named("l_y_2", "mm", "EN 1993-1-5 (6.11)", l_e + x.t_f * root(m_1 / 2.0 + squared(l_e / x.t_f) + load.m_2));
     const N beyond = named("l_y_3", "mm", "EN 1993-1-5 (6.12)", l_e + x.t_f * root(m_1 + load.m_2));
     return named("l_y", "mm", "EN 1993-1-5 6.5(3)", least(over_patch, least(at_edge, beyond)));
 }
@@ -78,11 +78,11 @@ template <class N> N end_patch_resistance(const PatchedWeb<N>& x, const N& t, co
     const N k_F = buckling_coefficient(x, s_s);
     const N F_cr = critical_load(x, k_F);
     const N m_2 = web_parameter(x);
-    const N lambda_with_m_2 = patch_slenderness(x, effective_loaded_length<N>(x, {s_s, k_F, m_2}), F_cr);
+    const N lambda_with_m_2 = named("lambda_F_m", "-", "EN 1993-1-5 (6.4), (6.9)",
+                                    patch_slenderness(x, effective_loaded_length<N>(x, {s_s, k_F, m_2}), F_cr));
     const N m_2_used = named("m_2_used", "-", "EN 1993-1-5 (6.9)", select(lambda_with_m_2 > N(0.5), m_2, N(0.0)));
     const N l_y = effective_loaded_length<N>(x, {s_s, k_F, m_2_used});
-    const N chi_F =
-        named("chi_F", "-", "EN 1993-1-5 (6.3)", least(0.5 / patch_slenderness(x, l_y, F_cr), N(1.0)));
+    const N chi_F = named("chi_F", "-", "EN 1993-1-5 (6.3)", least(0.5 / patch_slenderness(x, l_y, F_cr), N(1.0)));
     return named("F_Rd", "N", "EN 1993-1-5 (6.1)", chi_F * l_y * x.t_w * x.f_y / gamma_M1);
 }
 

@@ -10,19 +10,20 @@
 // Which section of a simply supported joist is worst. A concentrated load stands where it is worst for the section
 // looked at, which is at that section for M and V alike, so at x from the support
 //     M(x) = x (L - x)(q/2 + F/L),    V(x) = V_0 - (q + F/L) x,    V_0 = qL/2 + F.
-// V falls along the half span, to V_Rd at x_1 (0 where V_0 <= V_Rd) and to V_Rd/2 at x_2; beyond x_2 nothing is reduced.
-// Before x_1 the reduction is whole and M grows, so x_1 is worst there. Between both, M <= k M_V, for any k, reads
-// Q(x) = M - k M_V <= 0 with a quadratic Q. If Q is convex its greatest value is at an end. If it is concave, its slope
-// at x_2, which is M' there since M_V is level, is not negative as long as x_2 <= L/2, so Q grows and is greatest at
-// x_2. Hence no section exceeds both x_1 and x_2. x_2 > L/2 needs F > V_Rd: the shear limit then fails at every span.
+// V falls along the half span, to V_Rd at x_1 (0 where V_0 <= V_Rd) and to V_Rd/2 at x_2; beyond x_2 nothing is
+// reduced. Before x_1 the reduction is whole and M grows, so x_1 is worst there. Between both, M <= k M_V, for any k,
+// reads Q(x) = M - k M_V <= 0 with a quadratic Q. If Q is convex its greatest value is at an end. If it is concave, its
+// slope at x_2, which is M' there since M_V is level, is not negative as long as x_2 <= L/2, so Q grows and is greatest
+// at x_2. Hence no section exceeds both x_1 and x_2. x_2 > L/2 needs F > V_Rd: the shear limit then fails at every
+// span.
 
 namespace spanledger::en1993 {
 
 /// A section's own resistances, and what the web contributes.
 template <class N> struct WebInBending {
-    N W_y; ///< mm3
-    N A_w; ///< h_w t_w, mm2
-    N t_w; ///< mm
+    N W_y;  ///< mm3
+    N A_w;  ///< h_w t_w, mm2
+    N t_w;  ///< mm
     N V_Rd; ///< N
 };
 
@@ -38,7 +39,8 @@ N moment_resistance_with_shear(const WebInBending<N>& x, const N& rho, const N& 
                  (x.W_y - rho * squared(x.A_w) / (4.0 * x.t_w)) * design_yield_strength);
 }
 
-/// x from the support at which V of a simply supported joist has fallen to `V`, at most L/2; 0 where it is never above, mm
+/// x from the support at which V of a simply supported joist has fallen to `V`, at most L/2; 0 where it is never above,
+/// mm
 template <class N> N section_with_shear(const beam::Load<N>& load, const N& L, const N& V) {
     const N V_0 = beam::simply_supported::shear(load, L);
     return named("x_V", "mm", "beam theory",

@@ -28,8 +28,8 @@ template <class N> N weak_axis_critical_load(const LateralStiffness<N>& x, const
     return named("N_cr_z", "N", "Euler", pi_squared * x.E * x.I_z / squared(l));
 }
 
-/// M_cr = C1 N_cr,z [sqrt(I_w/I_z + G I_t/N_cr,z + (C2 z_g)2) - C2 z_g] of a doubly symmetric section whose ends are held
-/// against twist and free to warp, N mm
+/// M_cr = C1 N_cr,z [sqrt(I_w/I_z + G I_t/N_cr,z + (C2 z_g)2) - C2 z_g] of a doubly symmetric section whose ends are
+/// held against twist and free to warp, N mm
 template <class N> N critical_moment(const LateralStiffness<N>& x, const LateralLoading<N>& loading, const N& l) {
     const N N_cr = weak_axis_critical_load(x, l);
     const N height = named("C_2 z_g", "mm", "NCCI, elastic critical moment", loading.C_2 * loading.z_g);
@@ -52,9 +52,9 @@ template <class N> struct LateralCurves {
 };
 
 template <class N> N imperfection_factor(const LateralCurves<N>& curves, const N& h_b) {
-    return named("alpha_LT", "-", "EN 1993-1-1 Tables 6.3 to 6.5",
-                 select(h_b <= curves.h_b_1, curves.alpha_1,
-                        [&] { return select(h_b <= curves.h_b_2, curves.alpha_2, curves.alpha_3); }));
+    return named("alpha_LT", "-", "EN 1993-1-1 Tables 6.3 to 6.5", select(h_b <= curves.h_b_1, curves.alpha_1, [&] {
+                     return select(h_b <= curves.h_b_2, curves.alpha_2, curves.alpha_3);
+                 }));
 }
 
 /// Where a buckling curve begins, and its shape.
@@ -65,7 +65,9 @@ template <class N> struct LateralCurve {
 };
 
 /// 6.3.2.2: the curve of the general case
-template <class N> LateralCurve<N> general_case(const N& alpha) { return {alpha, N(0.2), N(1.0)}; }
+template <class N> LateralCurve<N> general_case(const N& alpha) {
+    return {alpha, N(0.2), N(1.0)};
+}
 
 /// Φ_LT = 0.5 (1 + α(λ - λ_LT,0) + βλ2)
 template <class N> N buckling_parameter(const N& lambda, const LateralCurve<N>& curve) {

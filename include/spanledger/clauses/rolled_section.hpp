@@ -3,8 +3,8 @@
 
 #include "spanledger/number/plain.hpp"
 
-// Section properties of rolled joists from their dimensions, root fillets included: I and H sections and parallel-flange
-// channels, bent about the axis parallel to the flanges. Lengths in mm.
+// Section properties of rolled joists from their dimensions, root fillets included: I and H sections and
+// parallel-flange channels, bent about the axis parallel to the flanges. Lengths in mm.
 
 namespace spanledger::rolled_section {
 
@@ -17,7 +17,9 @@ template <class N> struct Size {
 };
 
 /// h_w = h - 2 t_f, mm: the web between the flanges
-template <class N> N web_depth(const Size<N>& x) { return named("h_w", "mm", "geometry", x.h - 2.0 * x.t_f); }
+template <class N> N web_depth(const Size<N>& x) {
+    return named("h_w", "mm", "geometry", x.h - 2.0 * x.t_f);
+}
 
 /// c = h_w - 2r, mm: the flat part of the web
 template <class N> N web_flat(const Size<N>& x) {
@@ -81,8 +83,8 @@ template <class N> N weak_second_moment(const Size<N>& x) {
                      roots_of_i_section * (corner.own + corner.area * squared(x.t_w / 2.0 + corner.distance)));
 }
 
-/// I_t = 2/3 (b - 0.63 t_f) t_f3 + 1/3 (h - 2 t_f) t_w3 + 2 (t_w/t_f)(0.145 + 0.1 r/t_f) D4, mm4, with the diameter D of
-/// the circle inscribed where web and flange meet, D = ((r + t_w/2)2 + (r + t_f)2 - r2)/(2r + t_f)
+/// I_t = 2/3 (b - 0.63 t_f) t_f3 + 1/3 (h - 2 t_f) t_w3 + 2 (t_w/t_f)(0.145 + 0.1 r/t_f) D4, mm4, with the diameter D
+/// of the circle inscribed where web and flange meet, D = ((r + t_w/2)2 + (r + t_f)2 - r2)/(2r + t_f)
 template <class N> N torsion_constant(const Size<N>& x) {
     const N D = named("D", "mm", "geometry",
                       (squared(x.r + x.t_w / 2.0) + squared(x.r + x.t_f) - squared(x.r)) / (2.0 * x.r + x.t_f));
@@ -120,7 +122,8 @@ template <class N> N weak_second_moment(const Size<N>& x) {
     return named("I_z", "mm4", "geometry", about_back - area(x, roots_of_channel) * squared(centroid(x)));
 }
 
-/// I_t = 2/3 b t_f3 + 1/3 (h - 2 t_f) t_w3 + 2 α D4 - 0.42 t_f4, mm4, with the circle inscribed where web and flange meet
+/// I_t = 2/3 b t_f3 + 1/3 (h - 2 t_f) t_w3 + 2 α D4 - 0.42 t_f4, mm4, with the circle inscribed where web and flange
+/// meet
 template <class N> N torsion_constant(const Size<N>& x) {
     const N r_f = x.r / x.t_f;
     const N w_f = x.t_w / x.t_f;

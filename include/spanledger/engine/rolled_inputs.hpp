@@ -79,7 +79,7 @@ enum class LoadHeight { top, centroid, bottom, stated };
 
 /// Choices that are not numbers.
 struct RolledKinds {
-    std::string refusal; ///< why the member is not covered at all; empty where it is
+    std::string refusal;  ///< why the member is not covered at all; empty where it is
     bool channel = false; ///< else an I or H section
     bool cantilever = false;
     LateralCurves lateral_curves = LateralCurves::rolled_sections;

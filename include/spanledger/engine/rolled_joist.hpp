@@ -68,9 +68,9 @@ public:
 private:
     /// Density in kg/m3 and sizes in mm: 1e-9 turns kg/m3 into kg/mm3.
     void loads() {
-        const N self_weight = kinds_->self_weight ? named("g_self", "N/mm", "EN 1991-1-1 5.2",
-                                                          in_.rho * 1e-9 * section_.A * gravity)
-                                                  : N(0.0);
+        const N self_weight = kinds_->self_weight
+                                  ? named("g_self", "N/mm", "EN 1991-1-1 5.2", in_.rho * 1e-9 * section_.A * gravity)
+                                  : N(0.0);
         actions_ = LineActions<N>(in_.actions, self_weight);
         design_.reserve(kinds_->combinations.size());
         for (const CombinationCase& combination : kinds_->combinations) design_.push_back(actions_.design(combination));
@@ -135,16 +135,17 @@ private:
     [[nodiscard]] N critical_moment(const en1993::LateralLoading<N>& loading, const N& L) const {
         const N unrestrained = en1993::critical_moment(section_.lateral, loading, L);
         if (!kinds_->restrained_at_intervals) return unrestrained;
-        const N between = en1993::critical_moment<N>(section_.lateral, {N(1.0), N(0.0), section_.z_g},
-                                                     in_.restraint_spacing);
+        const N between =
+            en1993::critical_moment<N>(section_.lateral, {N(1.0), N(0.0), section_.z_g}, in_.restraint_spacing);
         return named("M_cr_r", "Nmm", "NCCI, elastic critical moment",
                      select(in_.restraint_spacing >= L, unrestrained, between));
     }
 
     [[nodiscard]] N buckling_resistance(const N& M_cr) const {
-        const en1993::LateralCurve<N> curve = kinds_->lateral_curves == LateralCurves::rolled_sections
-                                                  ? en1993::LateralCurve<N>{section_.alpha_LT, in_.lambda_LT_0, in_.beta}
-                                                  : en1993::general_case(section_.alpha_LT);
+        const en1993::LateralCurve<N> curve =
+            kinds_->lateral_curves == LateralCurves::rolled_sections
+                ? en1993::LateralCurve<N>{section_.alpha_LT, in_.lambda_LT_0, in_.beta}
+                : en1993::general_case(section_.alpha_LT);
         const N chi = en1993::reduction_factor(en1993::lateral_slenderness(section_.W_y, in_.f_y, M_cr), curve);
         const N f_yd = named("f_yd_1", "MPa", "EN 1993-1-1 (6.55)", in_.f_y / in_.gamma_M1);
         return en1993::buckling_resistance(chi, section_.W_y, f_yd);
@@ -162,8 +163,8 @@ private:
         const auto has_force = [](const CombinationCase& c) { return c.action == Action::concentrated; };
         const N M_cr = critical_moment({in_.C_1_uniform, in_.C_2_uniform, section_.z_g}, L);
         const N M_b_uniform = buckling_resistance(M_cr);
-        const N M_b_force = std::any_of(cases.begin(), cases.end(), has_force) ? buckling_resistance_with_force(M_cr, L)
-                                                                              : M_b_uniform;
+        const N M_b_force =
+            std::any_of(cases.begin(), cases.end(), has_force) ? buckling_resistance_with_force(M_cr, L) : M_b_uniform;
         for (std::size_t i = 0; i < cases.size(); ++i) {
             out(moment(design_[i], L), has_force(cases[i]) ? M_b_force : M_b_uniform);
         }

@@ -14,13 +14,13 @@ namespace spanledger {
 
 /// What a rolled section gives a joist, whatever its span, spacing and load: worked out once for a member.
 template <class N> struct RolledProperties {
-    N A;                          ///< mm2
-    N EI;                         ///< N mm2
-    N shear_flexibility;          ///< 1/N, 1/(G A_w)
-    N W_y;                        ///< mm3, plastic or elastic by class
-    N M_c;                        ///< N mm
-    N V_c;                        ///< N
-    N F_Rd;                       ///< N, at the bearing length of the joist
+    N A;                 ///< mm2
+    N EI;                ///< N mm2
+    N shear_flexibility; ///< 1/N, 1/(G A_w)
+    N W_y;               ///< mm3, plastic or elastic by class
+    N M_c;               ///< N mm
+    N V_c;               ///< N
+    N F_Rd;              ///< N, at the bearing length of the joist
     en1993::WebInBending<N> web;
     en1993::LateralStiffness<N> lateral; ///< I and H sections
     N alpha_LT;
@@ -37,17 +37,17 @@ template <class N> struct Classes {
 
 template <class N> Classes<N> classes(const RolledKinds& kinds, const RolledInputs<N>& in) {
     const N eps = en1993::epsilon(in.f_y);
-    const N c_f = kinds.channel ? rolled_section::channel::outstand(in.size) : rolled_section::i_section::outstand(in.size);
+    const N c_f =
+        kinds.channel ? rolled_section::channel::outstand(in.size) : rolled_section::i_section::outstand(in.size);
     const N c_w = rolled_section::web_flat(in.size);
-    return {en1993::part_class(named("c_f/t_f", "-", "EN 1993-1-1 Table 5.2", c_f / in.size.t_f), eps,
-                               en1993::outstand_in_compression),
-            en1993::part_class(named("c_w/t_w", "-", "EN 1993-1-1 Table 5.2", c_w / in.size.t_w), eps,
-                               en1993::web_in_bending)};
+    const N flange = named("c_f/t_f", "-", "EN 1993-1-1 Table 5.2", c_f / in.size.t_f);
+    const N web = named("c_w/t_w", "-", "EN 1993-1-1 Table 5.2", c_w / in.size.t_w);
+    return {en1993::flange_class(flange, eps), en1993::web_class(web, eps)};
 }
 
 template <class N> N shear_resistance(const RolledKinds& kinds, const RolledInputs<N>& in, const N& A) {
-    const N A_v = kinds.channel ? en1993::shear_area_of_channel(in.size, A)
-                                : en1993::shear_area_of_i_section(in.size, A, in.eta);
+    const N A_v =
+        kinds.channel ? en1993::shear_area_of_channel(in.size, A) : en1993::shear_area_of_i_section(in.size, A, in.eta);
     const en1993::Web<N> web{rolled_section::web_depth(in.size), in.size.t_w, in.f_y, en1993::epsilon(in.f_y), in.eta};
     return en1993::shear_resistance(en1993::plastic_shear_resistance(A_v, in.f_y, in.gamma_M0), web, in.gamma_M1);
 }
