@@ -13,8 +13,9 @@ namespace spanledger {
 
 namespace {
 
-constexpr const char* channel_hint = "write a lipped channel as C 150x50x15x1.5 r2.5: depth x flange x lip x nominal "
-                                     "thickness, inner radius in mm; unequal flanges 74/66, the compression flange first";
+constexpr const char* channel_hint =
+    "write a lipped channel as C 150x50x15x1.5 r2.5: depth x flange x lip x nominal "
+    "thickness, inner radius in mm; unequal flanges 74/66, the compression flange first";
 
 /// The text in small letters without blanks, and with x between sizes however it is written.
 std::string plain_channel(std::string_view text) {
@@ -61,8 +62,8 @@ bool same_size(const LippedChannelSize& a, const LippedChannelSize& b) {
 ColdFormedMember make_member(const ColdFormedGrade& grade, const LippedChannelSize& size, const Catalogue& catalogue) {
     ColdFormedMember member{.grade = grade, .size = size, .density = parameter(catalogue, "steel_density")};
     const auto& rows = catalogue.cold_formed_sizes;
-    const auto row =
-        std::find_if(rows.begin(), rows.end(), [&](const ColdFormedSize& known) { return same_size(known.size, size); });
+    const auto row = std::find_if(rows.begin(), rows.end(),
+                                  [&](const ColdFormedSize& known) { return same_size(known.size, size); });
     if (row != rows.end()) member.size_provenance = row->provenance;
     return member;
 }

@@ -104,7 +104,7 @@ Cell CellSolver::utilisation(double spacing, double clear_span) const {
     const Appraisal appraisal =
         appraise(*rules_, *joist(spacing), clear_span + rules_->span_addition(), cap_);
     // Rounded up: a printed 1.00 passes. The last digits of a computed 1 do not make it 1.01.
-    cell.value = std::ceil(appraisal.utilisation * 100.0 - 1e-9) / 100.0;
+    cell.value = std::ceil(appraisal.utilisation * 100.0 - 1e-9) / 100.0 + 0.0; // no -0
     cell.permissible = appraisal.utilisation;
     cell.utilisation = appraisal.utilisation;
     cell.governing = appraisal.worst;

@@ -54,11 +54,13 @@ private:
         checked(Limit::shear, std::string(cold_formed) + "6.1.5, (6.8)", "N", combination_labels());
         checked(Limit::bending_with_shear, std::string(cold_formed) + "6.1.10, (6.27)", "-", combination_labels());
         if (kinds_->web_stiffened) {
-            not_applicable(Limit::bearing, std::string(cold_formed) + "6.1.7", "web stated as stiffened or cleated at its supports");
+            not_applicable(Limit::bearing, std::string(cold_formed) + "6.1.7",
+                           "web stated as stiffened or cleated at its supports");
         } else {
             checked(Limit::bearing, std::string(cold_formed) + "6.1.7.2, (6.15a)", "N", combination_labels());
         }
-        not_applicable(Limit::lateral_buckling, std::string(cold_formed) + "6.2.4", "compression flange stated as held");
+        not_applicable(Limit::lateral_buckling, std::string(cold_formed) + "6.2.4",
+                       "compression flange stated as held");
     }
 
     void deflections() {
@@ -94,8 +96,9 @@ private:
         if (!asked) {
             const bool timber_rule = inputs_->brief.limits.vibration.has_value();
             return not_applicable(Limit::frequency, liveliness_clause,
-                                  timber_rule ? "the vibration rule of the brief is for timber; no frequency is asked for"
-                                              : "not asked for in the brief");
+                                  timber_rule
+                                      ? "the vibration rule of the brief is for timber; no frequency is asked for"
+                                      : "not asked for in the brief");
         }
         if (!kinds_->self_weight && !have_mass(kinds_->frequency, *load_, asked->variable_share)) {
             not_applicable(Limit::frequency, liveliness_clause, "no permanent load: the joist has no mass");

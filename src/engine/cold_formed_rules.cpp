@@ -21,8 +21,7 @@ struct ColdFormedFamily {
     template <class N> static Section<N> section(const Kinds& kinds, const Inputs<N>& inputs) {
         return cold_formed_section(inputs, kinds);
     }
-    template <class N>
-    static Joist<N> joist(const Kinds& kinds, const Inputs<N>& inputs, const Section<N>& section) {
+    template <class N> static Joist<N> joist(const Kinds& kinds, const Inputs<N>& inputs, const Section<N>& section) {
         return {kinds, inputs, section};
     }
 
@@ -49,7 +48,8 @@ JoistFacts ColdFormedFamily::facts(const Kinds& kinds, const Inputs<double>& /*i
             const auto w = joist.deflections(service, L);
             return std::vector{w.w_Q, w.w_inst};
         });
-    if (joist.actions().permanent() > 0.0) facts.first_frequency = joist.first_frequency(ServiceCase{}, L); // permanent mass
+    if (joist.actions().permanent() > 0.0)
+        facts.first_frequency = joist.first_frequency(ServiceCase{}, L); // permanent mass
     facts.reactions = support_reactions(kinds, joist, L, false);
     if (!kinds.web_stiffened) {
         facts.bearing_length_needed =

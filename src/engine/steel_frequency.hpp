@@ -19,7 +19,8 @@ namespace spanledger {
 }
 
 /// Whether a joist without self-weight has mass in every one of these cases, with a share of the variable action.
-[[nodiscard]] inline bool have_mass(const std::vector<ServiceCase>& cases, const LoadClass& load, double variable_share) {
+[[nodiscard]] inline bool have_mass(const std::vector<ServiceCase>& cases, const LoadClass& load,
+                                    double variable_share) {
     if (load.permanent + load.permanent_partitions > 0.0) return true;
     for (const ServiceCase& service : cases) {
         const double variable = service.action == Action::uniform ? load.variable + load.partitions

@@ -51,7 +51,7 @@ private:
     void strength() {
         checked(Limit::bending, std::string(ec5) + "6.1.6", "MPa", combination_labels());
         checked(Limit::shear, std::string(ec5) + "6.1.7", "MPa", combination_labels());
-        not_applicable(Limit::bending_with_shear, ec5, "EN 1995-1-1 has no interaction of bending with shear");
+        not_applicable(Limit::bending_with_shear, "EN 1995-1-1", "EN 1995-1-1 has no interaction of bending with shear");
         if (kinds_->cantilever) {
             not_applicable(Limit::bearing, std::string(ec5) + "6.1.5",
                            "cantilever: the bearing of the root and its hold-down are the reader's");

@@ -39,7 +39,8 @@ LippedChannelSize read_size(CsvRecord& record) {
                                  .r = record.number("r_mm", radius_range)};
     if (!record.good()) return size;
     if (const std::string problem = lipped_channel_problem(size); !problem.empty()) {
-        record.error("h_mm", "contradiction", fmt::format("'{}' is not possible: {}", lipped_channel_name(size), problem),
+        record.error("h_mm", "contradiction",
+                     fmt::format("'{}' is not possible: {}", lipped_channel_name(size), problem),
                      "check whether values stand in the wrong column");
     }
     return size;

@@ -29,7 +29,7 @@ std::string_view verdict_word(Verdict verdict) {
 std::string utilisation_text(double utilisation) {
     constexpr double places = 1000.0;
     constexpr double rounding = 1e-9;
-    return fmt::format("{:.3f}", std::ceil(utilisation * places - rounding) / places);
+    return fmt::format("{:.3f}", std::ceil(utilisation * places - rounding) / places + 0.0);
 }
 
 /// In m, rounded down to 1 mm.
@@ -183,7 +183,7 @@ private:
         out_.table(table);
         if (check_->bearing_length_needed) {
             out_.fact("bearing length needed",
-                      fmt::format("{:.0f} mm", std::ceil(*check_->bearing_length_needed - 1e-9)));
+                      fmt::format("{:.0f} mm", std::ceil(*check_->bearing_length_needed - 1e-9) + 0.0));
         }
     }
 

@@ -27,7 +27,7 @@ void append_metres_down(std::string& line, double mm) {
 void append_utilisation(std::string& line, double utilisation) {
     constexpr double places = 1e4;
     constexpr double rounding = 1e-8;
-    fmt::format_to(std::back_inserter(line), "{:.4f}", std::ceil(utilisation * places - rounding) / places);
+    fmt::format_to(std::back_inserter(line), "{:.4f}", std::ceil(utilisation * places - rounding) / places + 0.0);
 }
 
 std::string header() {

@@ -3,10 +3,14 @@
 
 #include "issue_sheets.hpp"
 #include "table_kinds.hpp"
+#include "utf8_bytes.hpp"
 
+#include "spanledger/input/utf8.hpp"
 #include "spanledger/writers/sheet_names.hpp"
 
 #include <fmt/format.h>
+
+#include <algorithm>
 
 namespace spanledger {
 namespace {
@@ -41,9 +45,23 @@ std::string holds(const TablePart& part) {
     return text;
 }
 
+/// The first characters of a text, with a sign where it goes on.
+std::string beginning(const std::string& text, std::size_t characters) {
+    if (count_characters(text) <= characters) return text;
+    std::size_t bytes = 0;
+    for (std::size_t n = 1; n < characters; ++n) bytes += first_character_bytes(std::string_view(text).substr(bytes));
+    return text.substr(0, bytes) + "…";
+}
+
+/// Number, table and members entry; where they are too long for a sheet's name, each keeps about half the room.
 std::string sheet_name(const TablePart& part) {
-    const std::string plain = fmt::format("{} {}, {}", part.number, part.table->name, part.table->members);
-    return part.parts > 1 ? fmt::format("{}.{} {}", part.number, part.part, plain.substr(plain.find(' ') + 1)) : plain;
+    constexpr std::size_t longest_name = 31;
+    const std::string number =
+        part.parts > 1 ? fmt::format("{}.{} ", part.number, part.part) : fmt::format("{} ", part.number);
+    const std::size_t room = longest_name - std::min(longest_name - 4, number.size() + 2);
+    const std::size_t of_members = std::min(count_characters(part.table->members), room / 2);
+    const std::string table = beginning(part.table->name, room - of_members);
+    return fmt::format("{}{}, {}", number, table, beginning(part.table->members, room - count_characters(table)));
 }
 
 } // namespace

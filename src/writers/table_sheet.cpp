@@ -19,8 +19,10 @@ const xlsx::Style note_style{.size = 8.5};
 const xlsx::Style head_style{.size = 9.0, .bold = true};
 const xlsx::Style row_head_style{.size = 10.0, .borders = {.bottom = Line::fine}};
 
-/// A head taller than this repeats only its legend and column heads on later pages, and does not stay on the screen.
+/// Points. A head taller than this repeats only its legend and column heads on later pages ...
 constexpr double tallest_repeated_head = 240.0;
+/// ... and one taller than this does not stay on the screen.
+constexpr double tallest_frozen_head = 300.0;
 
 /// The styles of a sheet's cells, found once: one per limit, and one for none.
 class CellStyles {
@@ -57,7 +59,12 @@ public:
         const double head_height = pen_.height();
         const std::uint32_t first_row = pen_.next_row();
         rows();
-        finish(head_height > tallest_repeated_head ? repeated : 0, first_row);
+        xlsx::PageSetUp page = page_set_up(issue_->brief.practice);
+        page.print_area = {{0, 0}, {pen_.next_row() - 1, static_cast<std::uint32_t>(layout_.widths.size() - 1)}};
+        page.first_repeated_row = head_height > tallest_repeated_head ? repeated : 0;
+        page.last_repeated_row = first_row - 1;
+        page.frozen = {head_height > tallest_frozen_head ? 0 : first_row, head_columns};
+        pen_.sheet().set_up(page);
     }
 
 private:
@@ -253,15 +260,6 @@ private:
     [[nodiscard]] std::string reason_mark(const Cell& cell) const {
         const auto found = std::find(reasons_.begin(), reasons_.end(), cell.reason);
         return fmt::format("{} {})", no_limit_mark, found - reasons_.begin() + 1);
-    }
-
-    void finish(std::uint32_t first_repeated, std::uint32_t first_row) {
-        xlsx::PageSetUp page = page_set_up(issue_->brief.practice);
-        page.print_area = {{0, 0}, {pen_.next_row() - 1, static_cast<std::uint32_t>(layout_.widths.size() - 1)}};
-        page.first_repeated_row = first_repeated;
-        page.last_repeated_row = first_row - 1;
-        page.frozen = {first_repeated == 0 ? first_row : 0, head_columns};
-        pen_.sheet().set_up(page);
     }
 
     const Issue* issue_;

@@ -49,25 +49,32 @@ std::string shortened(const std::string& text, std::size_t bytes) {
     return text.substr(0, end);
 }
 
-/// A part of a header or footer: & begins a code there.
+/// A part of a header or footer: & begins a code there. What is too long ends with a sign that says so.
 std::string header_part(const std::string& words) {
-    constexpr std::size_t longest_part = 60; // three parts and their codes in 255 characters
+    constexpr std::size_t longest_part = 69; // bytes: with the sign and the codes, three parts fit in 255
+    std::string_view rest = words;
     std::string coded;
-    for (std::size_t i = 0; i < words.size(); ++i) {
-        const std::string_view rest = std::string_view(words).substr(i);
-        if (rest.starts_with("&[page]")) {
-            coded += "&P";
-            i += std::string_view("&[page]").size() - 1;
-        } else if (rest.starts_with("&[pages]")) {
-            coded += "&N";
-            i += std::string_view("&[pages]").size() - 1;
-        } else if (words[i] == '&') {
-            coded += "&&";
+    const auto take = [&rest](std::string_view words_taken) {
+        const bool there = rest.starts_with(words_taken);
+        if (there) rest.remove_prefix(words_taken.size());
+        return there;
+    };
+    while (!rest.empty()) {
+        std::string next;
+        if (take("&[page]")) {
+            next = "&P";
+        } else if (take("&[pages]")) {
+            next = "&N";
+        } else if (take("&")) {
+            next = "&&";
         } else {
-            coded += words[i];
+            next = rest.substr(0, first_character_bytes(rest));
+            rest.remove_prefix(next.size());
         }
+        if (coded.size() + next.size() > longest_part) return coded + "…";
+        coded += next;
     }
-    return shortened(coded, longest_part);
+    return coded;
 }
 
 std::string header_text(const PageWords& words) {

@@ -184,7 +184,8 @@ TEST_CASE("the bearing length needed is where the reaction meets its resistance"
 
 TEST_CASE("the basis tells of channels where the brief has some, and of their sources", "[cold-formed]") {
     const auto brief = [](const std::string& members) {
-        return "[practice]\nname = \"p\"\nnumber = \"n\"\nrevision = \"A\"\ntitle = \"t\"\n[support]\ncompression_edge = "
+        return "[practice]\nname = \"p\"\nnumber = \"n\"\nrevision = \"A\"\ntitle = \"t\"\n[support]\ncompression_edge "
+               "= "
                "\"held\"\n[[load]]\nname = \"floor\"\ncategory = \"A\"\npermanent_kN_m2 = 0.5\nvariable_kN_m2 = 1.5\n"
                "[[members]]\nname = \"joists\"\n" +
                members +

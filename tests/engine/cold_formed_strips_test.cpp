@@ -120,8 +120,8 @@ TEST_CASE("where the stiffener does not settle, the step with the smaller reduct
     for (const Cycle& cycle : {Cycle{{{308.185, 122.697, 122.697, 26.5613, 2.89329, 3}, 431.051}, 0.473043, 59.0276},
                                Cycle{{{93.2206, 71.5978, 71.5978, 16.3765, 1.48319, 3}, 519.862}, 0.473137, 29.8839}}) {
         const auto x = lipped_channel::mid_line(cycle.example.size, 0.04);
-        const auto flange = en1993_1_3::effective_flange(
-            en1993_1_3::compression_flange<double>(x, {cycle.example.f_yb, 210000, 0.3}));
+        const auto flange =
+            en1993_1_3::effective_flange(en1993_1_3::compression_flange<double>(x, {cycle.example.f_yb, 210000, 0.3}));
         CHECK(flange.chi_d == Approx(cycle.chi_d).epsilon(0).margin(1e-6));
         CHECK(flange.b_e2 == Approx(cycle.b_e2).epsilon(0).margin(1e-4));
     }

@@ -96,8 +96,7 @@ inline double modulus(const Case& c) {
 }
 
 inline double self_weight(const Case& c) {
-    if (!c.self_weight)
-        return 0.0;
+    if (!c.self_weight) return 0.0;
     const double kg_per_m = c.timber.rho_mean * (breadth(c) / 1000.0) * (c.h / 1000.0);
     return kg_per_m * 9.81 / 1000.0; // N/m to N/mm
 }
@@ -122,10 +121,8 @@ inline std::vector<Combined> combinations(const Case& c) {
             all.push_back({c.xi * 1.35 * G + 1.5 * q, 1.5 * F, m, k, concentrated});
         }
     };
-    if (l.q > 0.0 || l.partitions > 0.0)
-        add(l.q * c.spacing + partitions, 0.0, l.q_duration, l.psi0, ksys);
-    if (l.snow > 0.0)
-        add(l.snow * c.spacing, 0.0, l.snow_duration, l.snow_psi0, ksys);
+    if (l.q > 0.0 || l.partitions > 0.0) add(l.q * c.spacing + partitions, 0.0, l.q_duration, l.psi0, ksys);
+    if (l.snow > 0.0) add(l.snow * c.spacing, 0.0, l.snow_duration, l.snow_psi0, ksys);
     if (l.Q > 0.0) {
         const int duration = l.partitions > 0.0 ? std::max(l.q_duration, l.Q_duration) : l.Q_duration;
         add(partitions, l.share * l.Q, duration, l.psi0, l.share < 1.0 ? 1.0 : ksys);
@@ -141,12 +138,9 @@ inline double kh(const Case& c) {
     const double h = c.h;
     switch (c.timber.kind) {
     case Kind::softwood:
-    case Kind::hardwood:
-        return c.timber.rho_k <= 700.0 && h < 150.0 ? std::min(std::pow(150.0 / h, 0.2), 1.3) : 1.0;
-    case Kind::glulam:
-        return h < 600.0 ? std::min(std::pow(600.0 / h, 0.1), 1.1) : 1.0;
-    case Kind::lvl:
-        return std::min(std::pow(300.0 / h, c.timber.s), 1.2);
+    case Kind::hardwood: return c.timber.rho_k <= 700.0 && h < 150.0 ? std::min(std::pow(150.0 / h, 0.2), 1.3) : 1.0;
+    case Kind::glulam: return h < 600.0 ? std::min(std::pow(600.0 / h, 0.1), 1.1) : 1.0;
+    case Kind::lvl: return std::min(std::pow(300.0 / h, c.timber.s), 1.2);
     }
     return 1.0;
 }
@@ -169,10 +163,8 @@ inline double shear(const Case& c, double L) {
     for (const Combined& x : combinations(c)) {
         double from_q = c.cantilever ? x.q * L : x.q * L / 2.0;
         double from_F = x.F;
-        if (!c.cantilever && c.uniform_near)
-            from_q = x.q * std::max(0.0, L / 2.0 - c.bearing / 2.0 - c.h);
-        if (!c.cantilever && c.concentrated_near)
-            from_F = x.F * std::max(0.0, L - c.bearing / 2.0 - c.h) / L;
+        if (!c.cantilever && c.uniform_near) from_q = x.q * std::max(0.0, L / 2.0 - c.bearing / 2.0 - c.h);
+        if (!c.cantilever && c.concentrated_near) from_F = x.F * std::max(0.0, L - c.bearing / 2.0 - c.h) / L;
         const double tau = 1.5 * (from_q + from_F) / (kcr * breadth(c) * c.h);
         worst = std::max(worst, tau / strength(c, c.timber.fv, x));
     }
@@ -182,11 +174,9 @@ inline double shear(const Case& c, double L) {
 inline double bearing(const Case& c, double L) {
     const double clear = L - c.bearing;
     double kc90 = 1.0;
-    if (clear >= 2.0 * c.h) {
-        if (c.timber.kind == Kind::softwood)
-            kc90 = 1.5;
-        if (c.timber.kind == Kind::glulam && c.bearing <= 400.0)
-            kc90 = 1.75;
+    if (clear >= 2.0 * c.h - 1e-9) { // the last digits of L - t do not count
+        if (c.timber.kind == Kind::softwood) kc90 = 1.5;
+        if (c.timber.kind == Kind::glulam && c.bearing <= 400.0) kc90 = 1.75;
     }
     const double contact = c.bearing + std::min(30.0, c.bearing);
     double worst = 0.0;
@@ -216,8 +206,7 @@ inline double critical_stress(const Case& c, double l_ef) {
     const double b = c.fixed_together ? breadth(c) : c.b;
     const double h = c.h;
     const Timber& m = c.timber;
-    if (m.kind == Kind::softwood || m.kind == Kind::glulam)
-        return 0.78 * b * b * m.E05 / (h * l_ef);
+    if (m.kind == Kind::softwood || m.kind == Kind::glulam) return 0.78 * b * b * m.E05 / (h * l_ef);
     const double I_tor = h * b * b * b / 3.0 * (1.0 - 0.63 * b / h + 0.052 * std::pow(b / h, 5));
     const double G05 = m.G05 ? *m.G05 : m.G * m.E05 / m.E;
     const double I_z = h * b * b * b / 12.0;
@@ -230,10 +219,8 @@ inline double relative_slenderness(const Case& c, double L, bool concentrated) {
 }
 
 inline double kcrit(double lambda) {
-    if (lambda <= 0.75)
-        return 1.0;
-    if (lambda <= 1.4)
-        return 1.56 - 0.75 * lambda;
+    if (lambda <= 0.75) return 1.0;
+    if (lambda <= 1.4) return 1.56 - 0.75 * lambda;
     return 1.0 / (lambda * lambda);
 }
 
@@ -268,20 +255,16 @@ inline Deflections deflections(const Case& c, double L, double q, double F, doub
     const double k = kdef(c);
     const double final_P = w_P * (1.0 + (c.partitions_creep_imposed ? psi2 : 1.0) * k);
     const double final_all = w_G * (1.0 + k) + final_P + w_V * (1.0 + psi2 * k);
-    const double relief = c.camber ? std::min(*c.camber, w_G * (1.0 + k)) : 0.0;
-    return {w_P + w_V, w_G + w_P + w_V, final_all - relief};
+    return {w_P + w_V, w_G + w_P + w_V, final_all - std::min(c.camber.value_or(0.0), w_G * (1.0 + k))};
 }
 
 inline std::vector<Deflections> all_deflections(const Case& c, double L) {
     const Loads& l = c.loads;
     const double P = l.partitions * c.spacing;
     std::vector<Deflections> all{deflections(c, L, 0.0, 0.0, 0.0, 0.0)};
-    if (l.q > 0.0 || P > 0.0)
-        all.push_back(deflections(c, L, l.q * c.spacing, 0.0, P, l.psi2));
-    if (l.snow > 0.0)
-        all.push_back(deflections(c, L, l.snow * c.spacing, 0.0, 0.0, l.snow_psi2));
-    if (l.Q > 0.0 && l.Q_in_deflection)
-        all.push_back(deflections(c, L, 0.0, l.share * l.Q, P, l.psi2));
+    if (l.q > 0.0 || P > 0.0) all.push_back(deflections(c, L, l.q * c.spacing, 0.0, P, l.psi2));
+    if (l.snow > 0.0) all.push_back(deflections(c, L, l.snow * c.spacing, 0.0, 0.0, l.snow_psi2));
+    if (l.Q > 0.0 && l.Q_in_deflection) all.push_back(deflections(c, L, 0.0, l.share * l.Q, P, l.psi2));
     return all;
 }
 
@@ -291,8 +274,7 @@ inline double deflection_limit(const Case& c, double L, std::size_t which) {
         const double value = which == 0 ? w.w_Q : which == 1 ? w.w_inst : w.w_net_fin;
         const DeflectionLimit& limit = *c.deflection[which];
         double allowed = limit.ratio ? L / *limit.ratio : *limit.length;
-        if (limit.length)
-            allowed = std::min(allowed, *limit.length);
+        if (limit.length) allowed = std::min(allowed, *limit.length);
         worst = std::max(worst, value / allowed);
     }
     return worst;

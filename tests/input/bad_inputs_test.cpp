@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: MIT
+#include "spanledger/input/brief_reader.hpp"
 #include "spanledger/input/brief_schema.hpp"
 #include "spanledger/input/inputs.hpp"
+#include "spanledger/input/toml_text.hpp"
 
 #include <catch2/catch.hpp>
 #include <fmt/format.h>
@@ -130,10 +132,29 @@ BriefText brief_with(const Line& changed) {
     return brief;
 }
 
+/// Reads a brief against the built-in catalogue, which is loaded once for all of them.
+Diagnostics problems_of(const std::string& text) {
+    Diagnostics diagnostics;
+    static const Catalogue catalogue = load_catalogue({}, "recommended", "", diagnostics);
+    const toml::Document document = toml::parse("brief.toml", text, diagnostics);
+    BriefSections sections(document, diagnostics);
+    Brief brief;
+    brief.practice = read_practice(sections.practice);
+    brief.basis = read_basis(sections.basis);
+    brief.support = read_support(sections.support);
+    brief.deck = read_deck(sections.deck);
+    brief.limits = read_limits(sections.limits);
+    brief.search = read_search(sections.search);
+    brief.loads = read_loads(sections.loads, catalogue, diagnostics);
+    brief.members = read_members(sections.members);
+    brief.tables = read_tables(sections.tables, brief);
+    check_consistency(sections, brief, catalogue);
+    return diagnostics;
+}
+
 /// Errors at the changed line.
 std::size_t errors_at_line(const BriefText& brief) {
-    Diagnostics diagnostics;
-    (void)read_inputs_from_text("brief.toml", brief.text, diagnostics);
+    const Diagnostics diagnostics = problems_of(brief.text);
     const auto& all = diagnostics.all();
     return static_cast<std::size_t>(std::count_if(all.begin(), all.end(), [&](const Diagnostic& diagnostic) {
         return diagnostic.severity == Severity::error && diagnostic.place.line == brief.changed_line;

@@ -51,17 +51,19 @@ TEST_CASE("Channels are read however they are spaced", "[cold-formed]") {
 }
 
 TEST_CASE("What is no channel is refused", "[cold-formed]") {
-    const auto text = GENERATE("", "C", "47x220", "IPE 200", "C 150x50x15x1.5", "C 150x50x15 r2.5", "150x50x15x1.5 r2.5",
-                               "C 150x50x15x1.5x2 r2.5", "C 150x50/x15x1.5 r2.5", "C 150x50/60/70x15x1.5 r2.5",
-                               "C 150x50x15x1,5 r2.5", "C 150x50x15xnan r2.5", "C 150x50x15x1.5 r2.5mm",
-                               "Z 150x50x15x1.5 r2.5", "C 150x50x15x1.5 r", "C 150x50x15x1.5 r2.5 r3");
+    const auto text =
+        GENERATE("", "C", "47x220", "IPE 200", "C 150x50x15x1.5", "C 150x50x15 r2.5", "150x50x15x1.5 r2.5",
+                 "C 150x50x15x1.5x2 r2.5", "C 150x50/x15x1.5 r2.5", "C 150x50/60/70x15x1.5 r2.5",
+                 "C 150x50x15x1,5 r2.5", "C 150x50x15xnan r2.5", "C 150x50x15x1.5 r2.5mm", "Z 150x50x15x1.5 r2.5",
+                 "C 150x50x15x1.5 r", "C 150x50x15x1.5 r2.5 r3");
     INFO(text);
     CHECK_FALSE(read_lipped_channel(text).has_value());
 }
 
 TEST_CASE("Impossible channels are refused with a reason", "[cold-formed]") {
-    const auto text = GENERATE("C 15x50x15x1.5 r2.5", "C 150x5x15x1.5 r2.5", "C 150x50x15x0 r2.5", "C 150x50x15x1.5 r60",
-                               "C 150x50x5x1.5 r4", "C 150x50x80x1.5 r2.5", "C 150x30x15x1.5 r14", "C -150x50x15x1.5 r2");
+    const auto text =
+        GENERATE("C 15x50x15x1.5 r2.5", "C 150x5x15x1.5 r2.5", "C 150x50x15x0 r2.5", "C 150x50x15x1.5 r60",
+                 "C 150x50x5x1.5 r4", "C 150x50x80x1.5 r2.5", "C 150x30x15x1.5 r14", "C -150x50x15x1.5 r2");
     Diagnostics diagnostics;
     INFO(text);
     CHECK_FALSE(proposed(std::string("S350GD ") + text, diagnostics).has_value());
@@ -173,10 +175,10 @@ TEST_CASE("Wrong rows of a practice's channels are reported", "[cold-formed]") {
         const char* code;
     };
     const TemporaryFolder folder;
-    for (const Wrong& wrong : {Wrong{"own,220,72,66,22,19,3,supplier", "out-of-range"},
-                               Wrong{"own,220,72,66,10,4,7,supplier", "contradiction"},
-                               Wrong{"own,220,72,66,22,1.9,3,", "missing-source"},
-                               Wrong{"own,220,72,66,22,nan,3,supplier", "bad-number"}}) {
+    for (const Wrong& wrong :
+         {Wrong{"own,220,72,66,22,19,3,supplier", "out-of-range"},
+          Wrong{"own,220,72,66,10,4,7,supplier", "contradiction"}, Wrong{"own,220,72,66,22,1.9,3,", "missing-source"},
+          Wrong{"own,220,72,66,22,nan,3,supplier", "bad-number"}}) {
         folder.write("sections.csv",
                      std::string("series,h_mm,b_1_mm,b_2_mm,c_mm,t_nom_mm,r_mm,source\n") + wrong.row + "\n");
         Diagnostics diagnostics;

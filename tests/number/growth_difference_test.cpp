@@ -12,7 +12,9 @@ using namespace spanledger;
 namespace {
 
 /// d ln f / d ln L of f(L) = 3 - 1e-9 L2, worked out by hand: -2e-9 L2/(3 - 1e-9 L2).
-double order_of_difference(double L) { return -2e-9 * L * L / (3.0 - 1e-9 * L * L); }
+double order_of_difference(double L) {
+    return -2e-9 * L * L / (3.0 - 1e-9 * L * L);
+}
 
 } // namespace
 

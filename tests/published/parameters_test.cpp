@@ -84,50 +84,51 @@ struct Value {
     const char* set = "recommended";
 };
 
+constexpr Mark seen = Mark::seen;
+constexpr Mark memory = Mark::from_memory;
+constexpr std::array values{
+    Value{seen, "gamma_G", "1.35", "-"},
+    Value{seen, "gamma_Q", "1.50", "-"},
+    Value{memory, "xi", "0.85", "-"},
+    Value{seen, "gamma_G", "1.35", "-", "uk"},
+    Value{seen, "gamma_Q", "1.5", "-", "uk"},
+    Value{memory, "xi", "0.925", "-", "uk"},
+    Value{seen, "gamma_M_solid", "1.30", "-"},
+    Value{seen, "gamma_M_glulam", "1.25", "-"},
+    Value{seen, "gamma_M_lvl", "1.20", "-"},
+    Value{seen, "gamma_M_solid", "1.3", "-", "uk"},
+    Value{seen, "k_sys", "1.1", "-"},
+    Value{seen, "k_sys_max_spacing", "610", "mm"},
+    Value{memory, "k_cr_solid", "0.67", "-"},
+    Value{memory, "k_cr_glulam", "0.67", "-"},
+    Value{memory, "k_cr_lvl", "1.0", "-"},
+    Value{seen, "kh_solid_depth", "150", "mm"},
+    Value{memory, "kh_solid_exponent", "0.2", "-"},
+    Value{memory, "kh_solid_cap", "1.3", "-"},
+    Value{memory, "kh_solid_max_density", "700", "kg/m3"},
+    Value{memory, "kh_glulam_depth", "600", "mm"},
+    Value{memory, "kh_glulam_exponent", "0.1", "-"},
+    Value{memory, "kh_glulam_cap", "1.1", "-"},
+    Value{seen, "kh_lvl_depth", "300", "mm"},
+    Value{memory, "kh_lvl_cap", "1.2", "-"},
+    Value{memory, "kc90_solid", "1.5", "-"},
+    Value{memory, "kc90_glulam", "1.75", "-"},
+    Value{memory, "kc90_glulam_max_length", "400", "mm"},
+    Value{memory, "kc90_extra_length", "30", "mm"},
+    Value{memory, "k_def_wet", "1.0", "-"},
+    Value{seen, "vibration_min_frequency", "8", "Hz"},
+    Value{seen, "vibration_damping_recommended_rule", "0.01", "-"},
+    Value{memory, "vibration_damping_uk_rule", "0.02", "-", "uk"},
+    Value{memory, "vibration_kamp_uk", "1.05", "-", "uk"},
+    Value{memory, "vibration_kstrut_uk", "0.97", "-", "uk"},
+    Value{memory, "vibration_kdist_floor", "0.30", "-", "uk"},
+    Value{memory, "vibration_a_short_mm", "1.8", "mm", "uk"},
+    Value{memory, "vibration_a_short_max_span", "4000", "mm", "uk"},
+    Value{memory, "vibration_a_long", "16500", "-", "uk"},
+    Value{memory, "vibration_a_long_exponent", "1.1", "-", "uk"},
+};
+
 Example parameter_table() {
-    constexpr Mark seen = Mark::seen;
-    constexpr Mark memory = Mark::from_memory;
-    const std::vector<Value> values{
-        {seen, "gamma_G", "1.35", "-"},
-        {seen, "gamma_Q", "1.50", "-"},
-        {memory, "xi", "0.85", "-"},
-        {seen, "gamma_G", "1.35", "-", "uk"},
-        {seen, "gamma_Q", "1.5", "-", "uk"},
-        {memory, "xi", "0.925", "-", "uk"},
-        {seen, "gamma_M_solid", "1.30", "-"},
-        {seen, "gamma_M_glulam", "1.25", "-"},
-        {seen, "gamma_M_lvl", "1.20", "-"},
-        {seen, "gamma_M_solid", "1.3", "-", "uk"},
-        {seen, "k_sys", "1.1", "-"},
-        {seen, "k_sys_max_spacing", "610", "mm"},
-        {memory, "k_cr_solid", "0.67", "-"},
-        {memory, "k_cr_glulam", "0.67", "-"},
-        {memory, "k_cr_lvl", "1.0", "-"},
-        {seen, "kh_solid_depth", "150", "mm"},
-        {memory, "kh_solid_exponent", "0.2", "-"},
-        {memory, "kh_solid_cap", "1.3", "-"},
-        {memory, "kh_solid_max_density", "700", "kg/m3"},
-        {memory, "kh_glulam_depth", "600", "mm"},
-        {memory, "kh_glulam_exponent", "0.1", "-"},
-        {memory, "kh_glulam_cap", "1.1", "-"},
-        {seen, "kh_lvl_depth", "300", "mm"},
-        {memory, "kh_lvl_cap", "1.2", "-"},
-        {memory, "kc90_solid", "1.5", "-"},
-        {memory, "kc90_glulam", "1.75", "-"},
-        {memory, "kc90_glulam_max_length", "400", "mm"},
-        {memory, "kc90_extra_length", "30", "mm"},
-        {memory, "k_def_wet", "1.0", "-"},
-        {seen, "vibration_min_frequency", "8", "Hz"},
-        {seen, "vibration_damping_recommended_rule", "0.01", "-"},
-        {memory, "vibration_damping_uk_rule", "0.02", "-", "uk"},
-        {memory, "vibration_kamp_uk", "1.05", "-", "uk"},
-        {memory, "vibration_kstrut_uk", "0.97", "-", "uk"},
-        {memory, "vibration_kdist_floor", "0.30", "-", "uk"},
-        {memory, "vibration_a_short_mm", "1.8", "mm", "uk"},
-        {memory, "vibration_a_short_max_span", "4000", "mm", "uk"},
-        {memory, "vibration_a_long", "16500", "-", "uk"},
-        {memory, "vibration_a_long_exponent", "1.1", "-", "uk"},
-    };
     Example e;
     e.title = "Parameters of EN 1990 and EN 1995-1-1";
     e.source = "the standards and the UK national annexes, quoted in Steel Buildings in Europe, Part 4 (gamma_G, "
@@ -209,11 +210,9 @@ std::vector<Example> psi_factors() {
 } // namespace published
 
 TEST_CASE("catalogue: k_mod, k_def and parameters as quoted") {
-    for (const auto& table : published::timber_parameters())
-        published::check(table);
+    for (const auto& table : published::timber_parameters()) published::check(table);
 }
 
 TEST_CASE("catalogue: psi factors as quoted") {
-    for (const auto& table : published::psi_factors())
-        published::check(table);
+    for (const auto& table : published::psi_factors()) published::check(table);
 }

@@ -10,8 +10,8 @@
 
 using namespace spanledger;
 
-// Access Steel SX022a-EN-EU. The inputs to the gross section were seen there; later figures are from memory. The figures
-// come out only with the spring stiffness and b_e1 of the first step kept through the iteration.
+// Access Steel SX022a-EN-EU. The inputs to the gross section were seen there; later figures are from memory. The
+// figures come out only with the spring stiffness and b_e1 of the first step kept through the iteration.
 
 namespace published {
 namespace {
@@ -21,7 +21,9 @@ using namespace en1993_1_3;
 const lipped_channel::Size<double> sx022{.h = 200, .b_1 = 74, .b_2 = 66, .c = 20.8, .t_nom = 2, .r = 3};
 const Steel<double> s350{.f_yb = 350, .E = 210000, .nu = 0.3};
 
-lipped_channel::MidLine<double> mid_line() { return lipped_channel::mid_line(sx022, 0.04); }
+lipped_channel::MidLine<double> mid_line() {
+    return lipped_channel::mid_line(sx022, 0.04);
+}
 
 Row seen(const char* quantity, const char* printed, double ours, const char* unit) {
     return {Mark::seen, quantity, printed, ours, unit};
@@ -115,8 +117,9 @@ std::vector<Row> effective_section() {
 Example lipped_channel_section() {
     Example e;
     e.title = "Effective section of a cold-formed lipped channel in bending";
-    e.source = "Access Steel SX022a-EN-EU, Calculation of effective section properties for a cold-formed lipped channel "
-               "section in bending, V. Ungureanu, A. Ruff, checked D. Dubina, December 2005";
+    e.source =
+        "Access Steel SX022a-EN-EU, Calculation of effective section properties for a cold-formed lipped channel "
+        "section in bending, V. Ungureanu, A. Ruff, checked D. Dubina, December 2005";
     e.inputs = "C 200x74/66x20.8x2 r3, core 1.96 mm, f_yb = 350 MPa, E = 210000 MPa, nu = 0.3, gamma_M0 = 1.0; spring "
                "stiffness and b_e1 of the first step kept";
     for (auto rows : {gross_section(), first_step(), settled_flange_and_web(), effective_section()}) {

@@ -81,8 +81,7 @@ inline Cell unlimited() {
     cell.utilisation = 0.25;
     cell.permissible = 30000.0;
     cell.reason = "no limit reached";
-    for (LimitOutcome& outcome : cell.limits)
-        outcome.kind = LimitOutcome::Kind::never_reached;
+    for (LimitOutcome& outcome : cell.limits) outcome.kind = LimitOutcome::Kind::never_reached;
     return cell;
 }
 
@@ -106,8 +105,7 @@ inline TableResult span_table(std::string name, std::string members, std::string
                         "Dwelling, G 0.25: Qk 2 kN, 1 of it on one joist, in strength only.",
                         "Dwelling, G 0.50: Qk 2 kN, 1 of it on one joist, in strength only."};
     for (const LoadClass& one : brief().loads) {
-        for (const double spacing : {400.0, 450.0, 600.0})
-            table.columns.push_back({one.name, spacing, {}});
+        for (const double spacing : {400.0, 450.0, 600.0}) table.columns.push_back({one.name, spacing, {}});
     }
     for (std::size_t row = 0; row < rows; ++row) {
         const double depth = 97.0 + 25.0 * static_cast<double>(row);
@@ -134,8 +132,7 @@ inline TableResult other_table(TableKind kind, double unit) {
     TableResult table = span_table("@Loads and ratios", "C24, 47 mm", "solid timber", 0);
     table.kind = kind;
     table.columns.clear();
-    for (const double span : {3000.0, 3600.0, 4200.0})
-        table.columns.push_back({"Dwelling, G 0.25", 400.0, span});
+    for (const double span : {3000.0, 3600.0, 4200.0}) table.columns.push_back({"Dwelling, G 0.25", 400.0, span});
     for (std::size_t row = 0; row < 4; ++row) {
         table.rows.push_back(
             {"C24", "47x" + std::to_string(147 + 25 * row), 147.0 + 25.0 * static_cast<double>(row), {}});

@@ -26,7 +26,8 @@ template <class N> N moment_resistance(const N& W_eff, const N& f_yb, const N& g
 
 /// 5.1(3): whether corners may be taken as sharp in resistance: r <= 5t and r <= 0.10 b_p of the web and both flanges;
 /// otherwise I is multiplied by 1 - 2δ (5.1(4)).
-template <class N> N resistance_corner_factor(const lipped_channel::MidLine<N>& x, const N& r, const N& stiffness_factor) {
+template <class N>
+N resistance_corner_factor(const lipped_channel::MidLine<N>& x, const N& r, const N& stiffness_factor) {
     const N narrowest = named("b_p_min", "mm", "EN 1993-1-3 5.1(3)", least(x.h_p, least(x.b_p1, x.b_p2)));
     return named("corner factor", "-", "EN 1993-1-3 5.1(3), (4)",
                  select(both(r <= 5.0 * x.t, r <= 0.10 * narrowest), N(1.0), stiffness_factor));

@@ -32,9 +32,9 @@ template <class N> struct StiffenerWidths {
 template <class N> StiffenerWidths<N> stiffener_widths(const EdgeStiffenedFlange<N>& flange, const N& chi_d) {
     const N lambda_b = named("lambda_p_b_red", "-", "EN 1993-1-3 (5.16)", flange.lambda_b * root(chi_d));
     const N lambda_c = named("lambda_p_c_red", "-", "EN 1993-1-3 (5.16)", flange.lambda_c * root(chi_d));
-    return {named("b_e2", "mm", "EN 1993-1-3 5.5.3.2(3)",
-                  0.5 * internal_reduction(lambda_b, N(1.0)) * flange.size.b_p1),
-            named("c_eff", "mm", "EN 1993-1-3 (5.13a)", outstand_reduction(lambda_c) * flange.size.c_p)};
+    return {
+        named("b_e2", "mm", "EN 1993-1-3 5.5.3.2(3)", 0.5 * internal_reduction(lambda_b, N(1.0)) * flange.size.b_p1),
+        named("c_eff", "mm", "EN 1993-1-3 (5.13a)", outstand_reduction(lambda_c) * flange.size.c_p)};
 }
 
 /// A_s = t(b_e2 + c_eff), mm2
@@ -50,11 +50,11 @@ template <class N> N stiffener_second_moment(const StiffenerWidths<N>& x, const 
                      x.c_eff * t * squared(x.c_eff / 2.0 - a));
 }
 
-/// (5.10b) with kf = 0 (the other flange is in tension): K = E t3/(4(1 - ν2)) / (b1^2 hw + b1^3), N/mm2; b1 from the web
-/// to the centroid of the stiffener
+/// (5.10b) with kf = 0 (the other flange is in tension): K = E t3/(4(1 - ν2)) / (b1^2 hw + b1^3), N/mm2; b1 from the
+/// web to the centroid of the stiffener
 template <class N> N spring_stiffness(const EdgeStiffenedFlange<N>& flange, const StiffenerWidths<N>& x) {
-    const N b_1 = named("b_1_s", "mm", "EN 1993-1-3 5.5.3.1(5)",
-                        flange.size.b_p1 - squared(x.b_e2) / (2.0 * (x.b_e2 + x.c_eff)));
+    const N b_1 =
+        named("b_1_s", "mm", "EN 1993-1-3 5.5.3.1(5)", flange.size.b_p1 - squared(x.b_e2) / (2.0 * (x.b_e2 + x.c_eff)));
     return named("K_1", "N/mm2", "EN 1993-1-3 (5.10b)",
                  flange.E * cubed(flange.size.t) / (4.0 * (1.0 - squared(flange.nu))) /
                      (squared(b_1) * flange.size.h_p + cubed(b_1)));
@@ -70,9 +70,8 @@ template <class N> N critical_stress(const EdgeStiffenedFlange<N>& flange, const
 /// (5.12): χd = 1 up to λd = 0.65, 1.47 - 0.723 λd to 1.38, 0.66/λd from there; never above 1 (at 0.65 the second
 /// gives a little more)
 template <class N> N distortional_reduction(const N& lambda_d) {
-    return select(lambda_d <= N(0.65), N(1.0), [&] {
-        return least(N(1.0), select(lambda_d < N(1.38), 1.47 - 0.723 * lambda_d, 0.66 / lambda_d));
-    });
+    return select(lambda_d <= N(0.65), N(1.0),
+                  [&] { return least(N(1.0), select(lambda_d < N(1.38), 1.47 - 0.723 * lambda_d, 0.66 / lambda_d)); });
 }
 
 /// χd and the widths from which it came
@@ -116,12 +115,11 @@ template <class N> EffectiveFlange<N> effective_flange(const EdgeStiffenedFlange
         if (settled(now.chi_d, before.chi_d)) break;
     }
     const auto last_is_smaller = now.chi_d <= before.chi_d;
-    return {named("b_e1", "mm", "EN 1993-1-3 5.5.3.2(3)", unreduced.b_e2),
-            named("b_e2", "mm", "EN 1993-1-3 5.5.3.2(10)",
-                  select(last_is_smaller, now.widths.b_e2, before.widths.b_e2)),
-            named("c_eff", "mm", "EN 1993-1-3 5.5.3.2(10)",
-                  select(last_is_smaller, now.widths.c_eff, before.widths.c_eff)),
-            named("chi_d", "-", "EN 1993-1-3 5.5.3.2(10)", least(now.chi_d, before.chi_d)), K};
+    return {
+        named("b_e1", "mm", "EN 1993-1-3 5.5.3.2(3)", unreduced.b_e2),
+        named("b_e2", "mm", "EN 1993-1-3 5.5.3.2(10)", select(last_is_smaller, now.widths.b_e2, before.widths.b_e2)),
+        named("c_eff", "mm", "EN 1993-1-3 5.5.3.2(10)", select(last_is_smaller, now.widths.c_eff, before.widths.c_eff)),
+        named("chi_d", "-", "EN 1993-1-3 5.5.3.2(10)", least(now.chi_d, before.chi_d)), K};
 }
 
 } // namespace spanledger::en1993_1_3

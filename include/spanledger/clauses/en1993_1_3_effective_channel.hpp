@@ -6,8 +6,8 @@
 #include "spanledger/clauses/lipped_channel.hpp"
 #include "spanledger/number/plain.hpp"
 
-// EN 1993-1-3:2006 5.5 and EN 1993-1-5:2006 4.4: effective section of a lipped channel bent about its strong axis to the
-// yield strength in its compression flange, with sharp corners.
+// EN 1993-1-3:2006 5.5 and EN 1993-1-5:2006 4.4: effective section of a lipped channel bent about its strong axis to
+// the yield strength in its compression flange, with sharp corners.
 
 namespace spanledger::en1993_1_3 {
 
@@ -33,8 +33,7 @@ template <class N> N compressed_depth(const lipped_channel::MidLine<N>& x, const
 }
 
 /// Effective web in one step: b_e1 = 0.4 ρ h_c below the flange, 0.6 ρ h_c above the neutral axis
-template <class N>
-EffectiveWeb<N> effective_web(const lipped_channel::MidLine<N>& x, const N& h_c, const N& epsilon) {
+template <class N> EffectiveWeb<N> effective_web(const lipped_channel::MidLine<N>& x, const N& h_c, const N& epsilon) {
     const N psi = named("psi", "-", "EN 1993-1-5 Table 4.1", (h_c - x.h_p) / h_c);
     const N lambda = plate_slenderness<N>({x.h_p, x.t, epsilon}, web_buckling_factor(psi));
     const N h_eff = named("h_eff", "mm", "EN 1993-1-5 Table 4.1", internal_reduction(lambda, psi) * h_c);
@@ -43,9 +42,9 @@ EffectiveWeb<N> effective_web(const lipped_channel::MidLine<N>& x, const N& h_c,
 }
 
 /// Properties of the effective parts together
-template <class N>
-lipped_channel::Properties<N> effective_properties(const lipped_channel::MidLine<N>& x,
-                                                   const EffectiveFlange<N>& flange, const EffectiveWeb<N>& web) {
+template <class N> lipped_channel::Properties<N> effective_properties(const lipped_channel::MidLine<N>& x,
+                                                                      const EffectiveFlange<N>& flange,
+                                                                      const EffectiveWeb<N>& web) {
     const N width = x.c_p + x.b_p2 + web.h_1 + web.h_2 + flange.b_e1 + (flange.b_e2 + flange.c_eff) * flange.chi_d;
     const N A = named("A_eff", "mm2", "EN 1993-1-3 5.5", x.t * width);
     const N first_moment = x.c_p * (x.h_p - x.c_p / 2.0) + x.b_p2 * x.h_p + web.h_2 * (x.h_p - web.h_2 / 2.0) +
@@ -66,15 +65,14 @@ lipped_channel::Properties<N> effective_properties(const lipped_channel::MidLine
 template <class N>
 EdgeStiffenedFlange<N> compression_flange(const lipped_channel::MidLine<N>& x, const Steel<N>& steel) {
     const N epsilon = yield_ratio(steel.f_yb);
-    const N lambda_b = named("lambda_p_b", "-", "EN 1993-1-5 4.4(2)",
-                             plate_slenderness<N>({x.b_p1, x.t, epsilon}, N(4.0)));
+    const N lambda_b =
+        named("lambda_p_b", "-", "EN 1993-1-5 4.4(2)", plate_slenderness<N>({x.b_p1, x.t, epsilon}, N(4.0)));
     const N lambda_c = named("lambda_p_c", "-", "EN 1993-1-5 4.4(2)",
                              plate_slenderness<N>({x.c_p, x.t, epsilon}, lip_buckling_factor(x.c_p, x.b_p1)));
     return {x, lambda_b, lambda_c, steel.E, steel.nu, steel.f_yb};
 }
 
-template <class N>
-lipped_channel::Properties<N> effective(const lipped_channel::MidLine<N>& x, const Steel<N>& steel) {
+template <class N> lipped_channel::Properties<N> effective(const lipped_channel::MidLine<N>& x, const Steel<N>& steel) {
     const EffectiveFlange<N> flange = effective_flange(compression_flange(x, steel));
     const EffectiveWeb<N> web = effective_web(x, compressed_depth(x, flange), yield_ratio(steel.f_yb));
     return effective_properties(x, flange, web);

@@ -9,10 +9,10 @@
 namespace spanledger::en1993_1_3 {
 
 template <class N> struct EndSupport {
-    N h_w; ///< between the mid-lines of the flanges, mm
-    N t;   ///< mm
-    N r;   ///< inner radius of the corners, mm
-    N f_yb;     ///< MPa
+    N h_w;  ///< between the mid-lines of the flanges, mm
+    N t;    ///< mm
+    N r;    ///< inner radius of the corners, mm
+    N f_yb; ///< MPa
     N gamma_M1;
 };
 

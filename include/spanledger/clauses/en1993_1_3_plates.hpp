@@ -21,14 +21,12 @@ template <class N> struct Plate {
 
 /// λp = (b/t)/(28.4 ε sqrt(kσ))
 template <class N> N plate_slenderness(const Plate<N>& plate, const N& k_sigma) {
-    return named("lambda_p", "-", "EN 1993-1-5 4.4(2)",
-                 plate.width / plate.t / (28.4 * plate.epsilon * root(k_sigma)));
+    return named("lambda_p", "-", "EN 1993-1-5 4.4(2)", plate.width / plate.t / (28.4 * plate.epsilon * root(k_sigma)));
 }
 
 /// (4.2): ρ = (λp - 0.055(3 + ψ))/λp2 <= 1, internal elements
 template <class N> N internal_reduction(const N& lambda_p, const N& psi) {
-    return named("rho", "-", "EN 1993-1-5 (4.2)",
-                 select(lambda_p <= N(0.673), N(1.0), [&] {
+    return named("rho", "-", "EN 1993-1-5 (4.2)", select(lambda_p <= N(0.673), N(1.0), [&] {
                      return least(N(1.0), (lambda_p - 0.055 * (3.0 + psi)) / squared(lambda_p));
                  }));
 }

@@ -9,8 +9,8 @@
 namespace spanledger::en1993_1_3 {
 
 template <class N> struct Web {
-    N h_w; ///< between the mid-lines of the flanges, mm
-    N t;   ///< mm
+    N h_w;  ///< between the mid-lines of the flanges, mm
+    N t;    ///< mm
     N f_yb; ///< MPa
     N E;    ///< MPa
 };
@@ -50,11 +50,11 @@ template <class N> struct BendingAndShear {
 /// over all sections with V > V_b/2, 0 where there are none.
 ///
 /// F stands where it is worst for the section: just beyond it, which gives the largest moment and the largest shear
-/// there at once. At x from the nearer support M = (q/2 + F/L) x (L - x) and V = q(L/2 - x) + F(1 - x/L). With x_e, where
-/// V = V_b/2, the left side f(x) is a parabola on [0, x_e]. Its slope at x_e is that of M alone, not negative up to
-/// mid-span. If it is concave it therefore rises all the way to x_e; if it is convex its largest value is at an end.
-/// Either way f(0) or f(x_e) is the largest. (Where V > V_b/2 even at mid-span, F > V_b and shear fails at any span; x_e is then
-/// kept at mid-span.)
+/// there at once. At x from the nearer support M = (q/2 + F/L) x (L - x) and V = q(L/2 - x) + F(1 - x/L). With x_e,
+/// where V = V_b/2, the left side f(x) is a parabola on [0, x_e]. Its slope at x_e is that of M alone, not negative up
+/// to mid-span. If it is concave it therefore rises all the way to x_e; if it is convex its largest value is at an end.
+/// Either way f(0) or f(x_e) is the largest. (Where V > V_b/2 even at mid-span, F > V_b and shear fails at any span;
+/// x_e is then kept at mid-span.)
 template <class N> N bending_with_shear(const beam::Load<N>& load, const N& L, const BendingAndShear<N>& resistance) {
     const N half = named("V_b/2", "N", "EN 1993-1-3 6.1.10", resistance.V_b / 2.0);
     const N V_0 = beam::simply_supported::shear(load, L);

@@ -17,21 +17,23 @@ template <class N> N bearing_stress(const N& R_d, const N& width, const N& l_ef)
     return named("sigma_c_90_d", "MPa", "EN 1995-1-1 (6.4)", R_d / (width * l_ef));
 }
 
-/// 6.1.5(4): kc,90 on discrete supports counts only where the clear distance is at least 2h
-template <class N> N bearing_factor(const N& k_c_90, const N& clear_span, const N& h) {
-    return named("k_c_90", "-", "EN 1995-1-1 6.1.5(4)", select(clear_span >= 2.0 * h, k_c_90, N(1.0)));
+/// A joist on discrete supports.
+template <class N> struct DiscreteSupport {
+    N k_c_90;
+    N t; ///< bearing length, mm
+    N h; ///< depth, mm
+};
+
+/// 6.1.5(4): kc,90 on discrete supports counts only where the clear distance L - t is at least 2h. Written in L, so that
+/// a span of just 2h is not lost in the last digit.
+template <class N> N bearing_factor(const DiscreteSupport<N>& x, const N& L) {
+    return named("k_c_90", "-", "EN 1995-1-1 6.1.5(4)", select(L >= 2.0 * x.h + x.t, x.k_c_90, N(1.0)));
 }
 
 /// The same for glulam, which also needs a contact length of at most 400 mm.
-template <class N> struct GlulamBearing {
-    N k_c_90;
-    N t;
-    N greatest_t; ///< 400 mm
-};
-
-template <class N> N bearing_factor_glulam(const GlulamBearing<N>& x, const N& clear_span, const N& h) {
+template <class N> N bearing_factor_glulam(const DiscreteSupport<N>& x, const N& greatest_t, const N& L) {
     return named("k_c_90", "-", "EN 1995-1-1 6.1.5(4)",
-                 select(both(clear_span >= 2.0 * h, x.t <= x.greatest_t), x.k_c_90, N(1.0)));
+                 select(both(L >= 2.0 * x.h + x.t, x.t <= greatest_t), x.k_c_90, N(1.0)));
 }
 
 } // namespace spanledger::en1995

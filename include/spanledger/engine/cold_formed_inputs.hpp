@@ -58,7 +58,7 @@ template <class Inputs, class Visit> void cold_formed_fields(Inputs& x, Visit&& 
 
 /// Choices that are not numbers.
 struct ColdFormedKinds {
-    std::string refusal; ///< why the member is not covered at all; empty where it is
+    std::string refusal;        ///< why the member is not covered at all; empty where it is
     bool web_stiffened = false; ///< stiffened or cleated at the supports
     bool self_weight = true;
     bool shear_deflection = false;

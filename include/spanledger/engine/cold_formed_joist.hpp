@@ -16,7 +16,8 @@ namespace spanledger {
 /// flange held. The section is worked out beforehand; every limit is a function of the effective span L.
 template <class N> class ColdFormedJoist {
 public:
-    ColdFormedJoist(const ColdFormedKinds& kinds, const ColdFormedInputs<N>& inputs, const ColdFormedProperties<N>& section)
+    ColdFormedJoist(const ColdFormedKinds& kinds, const ColdFormedInputs<N>& inputs,
+                    const ColdFormedProperties<N>& section)
         : kinds_(&kinds), in_(inputs), section_(section) {
         loads();
     }
@@ -59,8 +60,9 @@ public:
 
     /// With the share of the variable action in the mass, Hz
     [[nodiscard]] N first_frequency(const ServiceCase& service, const N& L) const {
-        const N m = named("m", "kg/mm", "beam theory",
-                          (actions_.permanent() + in_.variable_share * actions_.characteristic(service.action).q) / gravity);
+        const N m =
+            named("m", "kg/mm", "beam theory",
+                  (actions_.permanent() + in_.variable_share * actions_.characteristic(service.action).q) / gravity);
         return beam::simply_supported::first_frequency(section_.EI_gr, m, L);
     }
 
@@ -75,9 +77,9 @@ public:
 private:
     /// Density in kg/m3 and sizes in mm: 1e-9 turns kg/m3 into kg/mm3.
     void loads() {
-        const N self_weight = kinds_->self_weight ? named("g_self", "N/mm", "EN 1991-1-1 5.2",
-                                                          in_.rho * 1e-9 * section_.A_nom * gravity)
-                                                  : N(0.0);
+        const N self_weight =
+            kinds_->self_weight ? named("g_self", "N/mm", "EN 1991-1-1 5.2", in_.rho * 1e-9 * section_.A_nom * gravity)
+                                : N(0.0);
         actions_ = LineActions<N>(in_.actions, self_weight);
         design_.reserve(kinds_->combinations.size());
         for (const CombinationCase& combination : kinds_->combinations) design_.push_back(actions_.design(combination));

@@ -17,8 +17,7 @@ namespace spanledger {
                                                 const LoadClass& load, UniformAction uniform);
 
 /// The rules of a joist whose numbers and kinds are at hand.
-[[nodiscard]] std::unique_ptr<JoistRules> make_cold_formed_rules(ColdFormedKinds kinds,
-                                                                 const ColdFormedInputs<double>& inputs,
-                                                                 LimitPlans plans);
+[[nodiscard]] std::unique_ptr<JoistRules>
+make_cold_formed_rules(ColdFormedKinds kinds, const ColdFormedInputs<double>& inputs, LimitPlans plans);
 
 } // namespace spanledger

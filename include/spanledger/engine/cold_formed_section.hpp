@@ -25,18 +25,17 @@ template <class N> struct ColdFormedProperties {
 namespace cold_formed {
 
 /// Shear resistance of the web, N
-template <class N> N shear_resistance(const ColdFormedInputs<N>& in, const lipped_channel::MidLine<N>& size,
-                                      bool web_stiffened) {
+template <class N>
+N shear_resistance(const ColdFormedInputs<N>& in, const lipped_channel::MidLine<N>& size, bool web_stiffened) {
     const en1993_1_3::Web<N> web{size.h_p, size.t, in.f_yb, in.E};
-    const N f_bv = web_stiffened ? en1993_1_3::shear_strength_stiffened(web)
-                                 : en1993_1_3::shear_strength_unstiffened(web);
+    const N f_bv =
+        web_stiffened ? en1993_1_3::shear_strength_stiffened(web) : en1993_1_3::shear_strength_unstiffened(web);
     return en1993_1_3::shear_resistance(web, f_bv, in.gamma_M0);
 }
 
 /// Moment resistance, N mm
-template <class N>
-N moment_resistance(const ColdFormedInputs<N>& in, const lipped_channel::Properties<N>& gross,
-                    const lipped_channel::Properties<N>& effective, const N& corner_factor) {
+template <class N> N moment_resistance(const ColdFormedInputs<N>& in, const lipped_channel::Properties<N>& gross,
+                                       const lipped_channel::Properties<N>& effective, const N& corner_factor) {
     const N W_el = named("W_el", "mm3", "geometry", en1993_1_3::section_modulus(gross, corner_factor * gross.I));
     const N W_eff = en1993_1_3::section_modulus(effective, corner_factor * effective.I);
     return en1993_1_3::moment_resistance(en1993_1_3::effective_modulus(W_eff, W_el), in.f_yb, in.gamma_M0);
@@ -44,7 +43,8 @@ N moment_resistance(const ColdFormedInputs<N>& in, const lipped_channel::Propert
 
 } // namespace cold_formed
 
-template <class N> ColdFormedProperties<N> cold_formed_section(const ColdFormedInputs<N>& in, const ColdFormedKinds& kinds) {
+template <class N>
+ColdFormedProperties<N> cold_formed_section(const ColdFormedInputs<N>& in, const ColdFormedKinds& kinds) {
     const lipped_channel::MidLine<N> size = lipped_channel::mid_line(in.size, in.coating);
     const N width = lipped_channel::developed_width(size);
     const lipped_channel::Properties<N> gross = lipped_channel::gross(size);

@@ -133,12 +133,13 @@ private:
 
     /// Between intermediate restraints the moment is taken as constant; a spacing of L or more restrains nothing.
     [[nodiscard]] N critical_moment(const en1993::LateralLoading<N>& loading, const N& L) const {
-        const N unrestrained = en1993::critical_moment(section_.lateral, loading, L);
-        if (!kinds_->restrained_at_intervals) return unrestrained;
-        const N between =
-            en1993::critical_moment<N>(section_.lateral, {N(1.0), N(0.0), section_.z_g}, in_.restraint_spacing);
-        return named("M_cr_r", "Nmm", "NCCI, elastic critical moment",
-                     select(in_.restraint_spacing >= L, unrestrained, between));
+        if (!kinds_->restrained_at_intervals) return en1993::critical_moment(section_.lateral, loading, L);
+        const en1993::LateralLoading<N> constant_moment{N(1.0), N(0.0), section_.z_g};
+        return named(
+            "M_cr_r", "Nmm", "NCCI, elastic critical moment",
+            select(
+                in_.restraint_spacing >= L, [&] { return en1993::critical_moment(section_.lateral, loading, L); },
+                [&] { return en1993::critical_moment(section_.lateral, constant_moment, in_.restraint_spacing); }));
     }
 
     [[nodiscard]] N buckling_resistance(const N& M_cr) const {

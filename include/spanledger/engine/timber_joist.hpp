@@ -220,12 +220,12 @@ private:
     }
 
     [[nodiscard]] N bearing_factor(const N& L) const {
-        const N clear_span = L - in_.t;
+        const en1995::DiscreteSupport<N> support{in_.k_c_90, in_.t, in_.h};
         switch (kinds_->bearing_rule) {
         case BearingRule::discrete:
-            return en1995::bearing_factor(in_.k_c_90, clear_span, in_.h);
+            return en1995::bearing_factor(support, L);
         case BearingRule::glulam:
-            return en1995::bearing_factor_glulam({in_.k_c_90, in_.t, in_.k_c_90_max_t}, clear_span, in_.h);
+            return en1995::bearing_factor_glulam(support, in_.k_c_90_max_t, L);
         case BearingRule::none:
             break;
         }
