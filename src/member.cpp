@@ -126,8 +126,8 @@ struct MassPerLength {
     }
     double operator()(const RolledMember& m) const {
         const RolledSection& s = m.section;
-        const double roots = s.shape == RolledShape::channel ? rolled_section::roots_of_channel
-                                                             : rolled_section::roots_of_i_section;
+        const double roots =
+            s.shape == RolledShape::channel ? rolled_section::roots_of_channel : rolled_section::roots_of_i_section;
         return m.density * rolled_section::area<double>({s.h, s.b, s.t_w, s.t_f, s.r}, roots) * square_metres;
     }
     double operator()(const ColdFormedMember& m) const {
@@ -154,13 +154,27 @@ struct Comparable {
 
 } // namespace
 
-std::string section_name(const Member& member) { return std::visit(SectionName{}, member); }
-std::string class_name(const Member& member) { return std::visit(ClassName{}, member); }
-std::string member_name(const Member& member) { return class_name(member) + " " + section_name(member); }
-std::string_view material_name(const Member& member) { return std::visit(MaterialName{}, member); }
-double depth_of(const Member& member) { return std::visit(DepthOf{}, member); }
-double mass_per_length(const Member& member) { return std::visit(MassPerLength{}, member); }
-bool comparable(const Member& a, const Member& b) { return std::visit(Comparable{}, a, b); }
+std::string section_name(const Member& member) {
+    return std::visit(SectionName{}, member);
+}
+std::string class_name(const Member& member) {
+    return std::visit(ClassName{}, member);
+}
+std::string member_name(const Member& member) {
+    return class_name(member) + " " + section_name(member);
+}
+std::string_view material_name(const Member& member) {
+    return std::visit(MaterialName{}, member);
+}
+double depth_of(const Member& member) {
+    return std::visit(DepthOf{}, member);
+}
+double mass_per_length(const Member& member) {
+    return std::visit(MassPerLength{}, member);
+}
+bool comparable(const Member& a, const Member& b) {
+    return std::visit(Comparable{}, a, b);
+}
 
 std::optional<double> stock_length_of(const Member& member) {
     return std::visit([](const auto& m) { return m.stock_length; }, member);

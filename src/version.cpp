@@ -3,6 +3,8 @@
 
 namespace spanledger {
 
-std::string_view program_version() noexcept { return SPANLEDGER_VERSION; }
+std::string_view program_version() noexcept {
+    return SPANLEDGER_VERSION;
+}
 
 } // namespace spanledger

@@ -19,7 +19,7 @@ namespace spanledger {
 /// Where a row comes from. Every row has one.
 struct Provenance {
     std::string source{}; ///< key in sources.csv, or the practice's own words for its own rows
-    bool seen = false;  ///< the value was seen in that source; otherwise it is recalled from memory
+    bool seen = false;    ///< the value was seen in that source; otherwise it is recalled from memory
     bool practice_own = false;
     std::string file{}; ///< the practice file, empty for built-in rows
     std::size_t line = 0;
@@ -40,8 +40,8 @@ struct TimberClass {
     std::string name;
     std::string standard;
     Timber timber = Timber::solid_softwood;
-    double f_m_k = 0.0;   ///< bending, edgewise
-    double f_v_k = 0.0;   ///< shear
+    double f_m_k = 0.0;    ///< bending, edgewise
+    double f_v_k = 0.0;    ///< shear
     double f_c_90_k = 0.0; ///< compression perpendicular to grain (edgewise for LVL)
     std::optional<double> f_t_0_k;
     std::optional<double> f_t_90_k;
@@ -77,9 +77,9 @@ struct ColdFormedGrade {
 /// Outer sizes of a lipped channel, mm.
 struct LippedChannelSize {
     double h = 0.0;
-    double b_1 = 0.0; ///< compression flange
-    double b_2 = 0.0; ///< tension flange
-    double c = 0.0;   ///< both lips
+    double b_1 = 0.0;   ///< compression flange
+    double b_2 = 0.0;   ///< tension flange
+    double c = 0.0;     ///< both lips
     double t_nom = 0.0; ///< zinc included
     double r = 0.0;     ///< inner radius of the corners
 };
@@ -152,8 +152,8 @@ struct ServiceFactors {
 
 /// One combination of actions (EN 1990) as data.
 struct Combination {
-    std::string set;   ///< "6.10" or "6.10a/b"
-    std::string name;  ///< "6.10", "6.10a", "6.10b", "6.10 permanent only", ...
+    std::string set;                ///< "6.10" or "6.10a/b"
+    std::string name;               ///< "6.10", "6.10a", "6.10b", "6.10 permanent only", ...
     bool reduced_permanent = false; ///< γG is multiplied by ξ
     enum class Variable { none, full, combination_value } variable = Variable::none;
     std::string clause;
@@ -185,7 +185,8 @@ struct Catalogue {
 [[nodiscard]] const LoadCategory* find_load_category(const Catalogue& catalogue, std::string_view name);
 [[nodiscard]] const ServiceFactors* find_service_factors(const Catalogue& catalogue, Timber timber, int service_class);
 
-/// Value of a parameter that the built-in catalogue defines. An unknown key is a fault in the program (std::logic_error).
+/// Value of a parameter that the built-in catalogue defines. An unknown key is a fault in the program
+/// (std::logic_error).
 [[nodiscard]] double parameter(const Catalogue& catalogue, std::string_view key);
 
 /// Words of the trade for a kind of timber: "solid timber", "glulam", "LVL" (the material column of results).

@@ -36,7 +36,8 @@ struct LimitDefinition {
 inline constexpr std::array limit_definitions{
     LimitDefinition{Limit::bending, "bending", 'M', 0xF9DCC4, "bending strength"},
     LimitDefinition{Limit::shear, "shear", 'V', 0xFBE8A6, "shear strength"},
-    LimitDefinition{Limit::bending_with_shear, "bending with shear", 'C', 0xF3E9D2, "bending strength reduced by shear"},
+    LimitDefinition{Limit::bending_with_shear, "bending with shear", 'C', 0xF3E9D2,
+                    "bending strength reduced by shear"},
     LimitDefinition{Limit::bearing, "bearing", 'R', 0xE3D5F1, "bearing on the support"},
     LimitDefinition{Limit::lateral_buckling, "lateral buckling", 'B', 0xF7D1DE, "lateral torsional buckling"},
     LimitDefinition{Limit::variable_deflection, "variable deflection", 'Q', 0xD6EEF5,
@@ -52,7 +53,9 @@ inline constexpr std::array limit_definitions{
 
 inline constexpr std::size_t limit_count = limit_definitions.size();
 
-[[nodiscard]] constexpr std::size_t index_of(Limit limit) noexcept { return static_cast<std::size_t>(limit); }
+[[nodiscard]] constexpr std::size_t index_of(Limit limit) noexcept {
+    return static_cast<std::size_t>(limit);
+}
 
 [[nodiscard]] constexpr const LimitDefinition& definition_of(Limit limit) noexcept {
     return limit_definitions[index_of(limit)];

@@ -13,8 +13,7 @@ Duration shortest_duration(const LoadClass& load, Action action) {
     case Action::snow: return load.snow_duration;
     case Action::uniform: return load.duration;
     case Action::concentrated:
-        return load.partitions > 0.0 ? std::max(load.duration, load.concentrated_duration)
-                                     : load.concentrated_duration;
+        return load.partitions > 0.0 ? std::max(load.duration, load.concentrated_duration) : load.concentrated_duration;
     }
     return Duration::permanent;
 }

@@ -42,8 +42,8 @@ private:
 
     void heading(std::string words) { heading_ = std::move(words); }
     void line(std::string item, Words words) {
-        lines_.push_back({heading_, std::move(item), std::move(words.value), std::move(words.clause),
-                          std::move(words.origin)});
+        lines_.push_back(
+            {heading_, std::move(item), std::move(words.value), std::move(words.clause), std::move(words.origin)});
     }
 
     void standards() {
@@ -55,8 +55,8 @@ private:
             std::array{"Strength classes", "EN 338:2016 (solid timber), EN 14080:2013 (glulam), EN 14374 (LVL)"},
         };
         for (const auto& [item, edition] : editions) line(item, {edition, "", "standard"});
-        line("Generation", {"first-generation Eurocodes; the second generation renumbers and changes some rules", "",
-                            "standard"});
+        line("Generation",
+             {"first-generation Eurocodes; the second generation renumbers and changes some rules", "", "standard"});
         line("Parameter set", {inputs_->catalogue.parameter_set, "national annexes"});
     }
 
@@ -65,12 +65,11 @@ private:
         const Support& support = brief_->support;
         const bool cantilever = support.arrangement == Arrangement::cantilever;
         line("Arrangement", {cantilever ? "cantilever, root stated as fixed" : "single span, simply supported"});
-        line("Bearing length", {fmt::format("{} mm at each support; the tables hold for this bearing only",
-                                            support.bearing)});
-        line("Span in the tables",
-             {cantilever ? "clear projection Lc from the face of the support to the tip"
-                         : "clear span Lc, face to face of supports",
-              "", "definition"});
+        line("Bearing length",
+             {fmt::format("{} mm at each support; the tables hold for this bearing only", support.bearing)});
+        line("Span in the tables", {cantilever ? "clear projection Lc from the face of the support to the tip"
+                                               : "clear span Lc, face to face of supports",
+                                    "", "definition"});
         line("Effective span", {cantilever ? "L = Lc + t/2" : "L = Lc + t; ratios L/n use L", "", "definition"});
         const SearchRange& search = brief_->search;
         line("Range searched",
@@ -84,18 +83,18 @@ private:
         heading("Material, sizes and moisture");
         const BasisChoice& basis = brief_->basis;
         line("Service class", {fmt::format("{}", basis.service_class), "EN 1995-1-1 2.3.1.3"});
-        line("Wet on installation", {basis.wet_on_installation ? "yes: kdef is raised by 1.0" : "no",
-                                     "EN 1995-1-1 3.2(4)"});
+        line("Wet on installation",
+             {basis.wet_on_installation ? "yes: kdef is raised by 1.0" : "no", "EN 1995-1-1 3.2(4)"});
         line("Sizes", {"target sizes at the reference moisture content of 20 % (EN 336, tolerance class 2 or better); "
                        "sections unnotched and unbored",
                        "EN 336", "assumption"});
-        line("Load sharing", {basis.load_sharing
-                                  ? fmt::format("stated: ksys = {} up to {} mm spacing, single-ply members; 1.0 with "
-                                                "the concentrated load where its share is below 1",
-                                                parameter(inputs_->catalogue, "k_sys"),
-                                                parameter(inputs_->catalogue, "k_sys_max_spacing"))
-                                  : "not used: ksys = 1.0",
-                              "EN 1995-1-1 6.6"});
+        line("Load sharing",
+             {basis.load_sharing ? fmt::format("stated: ksys = {} up to {} mm spacing, single-ply members; 1.0 with "
+                                               "the concentrated load where its share is below 1",
+                                               parameter(inputs_->catalogue, "k_sys"),
+                                               parameter(inputs_->catalogue, "k_sys_max_spacing"))
+                                 : "not used: ksys = 1.0",
+              "EN 1995-1-1 6.6"});
     }
 
     void restraint_and_deck() {
@@ -114,8 +113,8 @@ private:
         }
         if (support.compression_edge == CompressionEdge::free) {
             constexpr std::array positions{"top edge", "centroid", "bottom edge (hanging)"};
-            line("Load position", {positions[static_cast<std::size_t>(support.load_position)],
-                                   "EN 1995-1-1 Table 6.1"});
+            line("Load position",
+                 {positions[static_cast<std::size_t>(support.load_position)], "EN 1995-1-1 Table 6.1"});
         }
         line("Ends", {"held against twist at the supports", "EN 1995-1-1 6.3.3(3)", "assumption"});
         const Deck& deck = brief_->deck;
@@ -173,9 +172,9 @@ private:
             words += fmt::format(", snow {} ({})", areal(load.snow), duration_word(load.snow_duration));
         }
         line(load.name, {words, "category " + load.category});
-        line(load.name + ", psi", {fmt::format("psi_0 {}, psi_1 {}, psi_2 {}", load.psi.psi0, load.psi.psi1,
-                                               load.psi.psi2),
-                                   "EN 1990 Table A1.1"});
+        line(load.name + ", psi",
+             {fmt::format("psi_0 {}, psi_1 {}, psi_2 {}", load.psi.psi0, load.psi.psi1, load.psi.psi2),
+              "EN 1990 Table A1.1"});
         if (load.snow > 0.0) {
             line(load.name + ", psi of snow", {fmt::format("psi_0 {}, psi_1 {}, psi_2 {}", load.snow_psi.psi0,
                                                            load.snow_psi.psi1, load.snow_psi.psi2),
@@ -296,7 +295,9 @@ private:
 
 } // namespace
 
-std::vector<BasisLine> basis_lines(const Inputs& inputs) { return Statement(inputs).lines(); }
+std::vector<BasisLine> basis_lines(const Inputs& inputs) {
+    return Statement(inputs).lines();
+}
 
 std::vector<std::string> cautions(const Inputs& inputs) {
     std::vector<std::string> words{

@@ -25,9 +25,8 @@ Limit worst_at(const JoistRules& rules, const Joist& joist, const Cell& cell, do
 }
 
 bool fails_at_once(const Cell& cell) {
-    return std::any_of(cell.limits.begin(), cell.limits.end(), [](const LimitOutcome& outcome) {
-        return outcome.kind == LimitOutcome::Kind::fails_at_once;
-    });
+    return std::any_of(cell.limits.begin(), cell.limits.end(),
+                       [](const LimitOutcome& outcome) { return outcome.kind == LimitOutcome::Kind::fails_at_once; });
 }
 
 } // namespace
@@ -101,8 +100,7 @@ Cell CellSolver::utilisation(double spacing, double clear_span) const {
     Cell cell;
     cell.reason = not_covered_reason(*rules_);
     if (!cell.reason.empty()) return cell;
-    const Appraisal appraisal =
-        appraise(*rules_, *joist(spacing), clear_span + rules_->span_addition(), cap_);
+    const Appraisal appraisal = appraise(*rules_, *joist(spacing), clear_span + rules_->span_addition(), cap_);
     // Rounded up: a printed 1.00 passes. The last digits of a computed 1 do not make it 1.01.
     cell.value = std::ceil(appraisal.utilisation * 100.0 - 1e-9) / 100.0 + 0.0; // no -0
     cell.permissible = appraisal.utilisation;
@@ -125,7 +123,9 @@ Appraisal appraise(const JoistRules& rules, const Joist& joist, double L, double
         if (plan.status == LimitStatus::not_covered) appraisal.covered = false;
         if (plan.status != LimitStatus::checked) continue;
         const double u = worst_check(rules, joist, definition.limit, L).utilisation;
-        appraisal.passes = appraisal.passes && spanledger::passes(plan, u, cap);
+        const bool pass = spanledger::passes(plan, u, cap);
+        appraisal.passes = appraisal.passes && pass;
+        if (pass && !plan.capped) continue; // a length that is in stock uses nothing up
         if (!appraisal.worst || u > appraisal.utilisation) {
             next = appraisal.utilisation;
             appraisal.next = appraisal.worst;

@@ -88,7 +88,7 @@ private:
     }
 
     void facts() {
-        const JoistFacts facts = joist_->facts(result_.effective_span);
+        const JoistFacts facts = joist_->facts(result_.effective_span, cap_);
         for (const auto& w : facts.deflections) {
             result_.deflections.push_back({w.name, w.action, w.mm, w.mm > 0.0 ? result_.effective_span / w.mm : 0.0});
         }
@@ -104,9 +104,8 @@ private:
         for (const MembersEntry& entry : inputs_->brief.members) {
             if (entry.material_class != class_name(request_->member)) continue;
             std::vector<Member> members = members_of(entry, inputs_->catalogue, ignored);
-            const bool holds = std::any_of(members.begin(), members.end(), [&](const Member& member) {
-                return member_name(member) == result_.member;
-            });
+            const bool holds = std::any_of(members.begin(), members.end(),
+                                           [&](const Member& member) { return member_name(member) == result_.member; });
             if (holds) {
                 *found = &entry;
                 return members;
@@ -180,6 +179,8 @@ private:
 
 } // namespace
 
-CheckResult check_joist(const Inputs& inputs, const CheckRequest& request) { return Checker(inputs, request).run(); }
+CheckResult check_joist(const Inputs& inputs, const CheckRequest& request) {
+    return Checker(inputs, request).run();
+}
 
 } // namespace spanledger

@@ -25,7 +25,7 @@ struct ColdFormedFamily {
         return {kinds, inputs, section};
     }
 
-    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, double L);
+    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, FactsAt at);
     static std::vector<double> breaks(const Kinds& /*kinds*/, const Inputs<double>& /*inputs*/, Limit /*limit*/) {
         return {};
     }
@@ -40,7 +40,8 @@ double bearing_length_needed(const ColdFormedJoist<double>& joist, double reacti
 }
 
 JoistFacts ColdFormedFamily::facts(const Kinds& kinds, const Inputs<double>& /*inputs*/, const Joist<double>& joist,
-                                   double L) {
+                                   FactsAt at) {
+    const double L = at.L;
     JoistFacts facts;
     if (!kinds.refusal.empty()) return facts;
     facts.deflections =
@@ -53,7 +54,7 @@ JoistFacts ColdFormedFamily::facts(const Kinds& kinds, const Inputs<double>& /*i
     facts.reactions = support_reactions(kinds, joist, L, false);
     if (!kinds.web_stiffened) {
         facts.bearing_length_needed =
-            bearing_length_needed(joist, joist.reaction(worst_combination(kinds, joist, L), L));
+            bearing_length_needed(joist, joist.reaction(worst_combination(kinds, joist, L), L) / at.cap);
     }
     return facts;
 }

@@ -12,7 +12,7 @@
 //   fields(inputs, visit)                            symbol, unit and meaning of every number
 //   section(kinds, inputs)                           all that neither spacing, load nor span changes
 //   joist(kinds, inputs, section)
-//   facts(kinds, inputs, joist, L)
+//   facts(kinds, inputs, joist, at)
 //   breaks(kinds, inputs, limit), is_cantilever(kinds), depth(inputs), notes(kinds)
 
 namespace spanledger {
@@ -46,9 +46,9 @@ std::vector<JoistFacts::Reaction> support_reactions(const Kinds& kinds, const J&
 }
 
 /// The largest deflection of each name over the actions; `values(service)` gives one per name.
-template <class Values>
-std::vector<JoistFacts::Deflection> largest_deflections(const std::vector<ServiceCase>& cases,
-                                                        const std::vector<std::string>& names, const Values& values) {
+template <class Values> std::vector<JoistFacts::Deflection> largest_deflections(const std::vector<ServiceCase>& cases,
+                                                                                const std::vector<std::string>& names,
+                                                                                const Values& values) {
     std::vector<JoistFacts::Deflection> rows;
     for (const std::string& name : names) rows.push_back({name, {}, -1.0});
     for (const ServiceCase& service : cases) {
@@ -59,6 +59,12 @@ std::vector<JoistFacts::Deflection> largest_deflections(const std::vector<Servic
     }
     return rows;
 }
+
+/// Where facts are asked for.
+struct FactsAt {
+    double L;   ///< effective span, mm
+    double cap; ///< utilisation that the bearing may reach
+};
 
 template <class Family> class FamilyJoist : public Joist {
 public:
@@ -72,12 +78,30 @@ public:
         joist_.checks(limit, L, [&out](double demand, double resistance) { *out++ = {demand, resistance}; });
     }
 
-    [[nodiscard]] JoistFacts facts(double L) const override { return Family::facts(*kinds_, inputs_, joist_, L); }
+    [[nodiscard]] JoistFacts facts(double L, double cap) const override {
+        return Family::facts(*kinds_, inputs_, joist_, {L, cap});
+    }
 
 private:
     const Kinds* kinds_;
     Inputs inputs_;
     typename Family::template Joist<double> joist_;
+};
+
+template <class Family> class FamilyGrowth : public JoistGrowth {
+public:
+    FamilyGrowth(const typename Family::Kinds& kinds, const typename Family::template Inputs<Growth>& inputs,
+                 const typename Family::template Section<Growth>& section)
+        : joist_(Family::joist(kinds, inputs, section)) {}
+
+    void checks(Limit limit, const Growth& L, Check<Growth>* out) const override {
+        joist_.checks(limit, L, [&out](const Growth& demand, const Growth& resistance) {
+            *out++ = {demand, resistance};
+        });
+    }
+
+private:
+    typename Family::template Joist<Growth> joist_;
 };
 
 template <class Family> class FamilyRules : public JoistRules {
@@ -87,8 +111,7 @@ public:
     template <class N> using Section = typename Family::template Section<N>;
 
     FamilyRules(Kinds kinds, const Inputs<double>& inputs, LimitPlans plans)
-        : kinds_(std::move(kinds)), inputs_(inputs), section_(Family::section(kinds_, inputs_)),
-          growing_(lifted<Growth>(inputs)), growing_section_(Family::section(kinds_, growing_)) {
+        : kinds_(std::move(kinds)), inputs_(inputs), section_(Family::section(kinds_, inputs_)) {
         plans_ = std::move(plans);
     }
 
@@ -96,13 +119,10 @@ public:
         return std::make_unique<FamilyJoist<Family>>(kinds_, varied(variation), section_);
     }
 
-    void growth(Limit limit, const Growth& spacing, const Growth& L, Check<Growth>* out) const override {
-        Inputs<Growth> inputs = growing_;
+    [[nodiscard]] std::unique_ptr<JoistGrowth> growth(const Growth& spacing) const override {
+        Inputs<Growth> inputs = lifted<Growth>(inputs_);
         inputs.actions.spacing = spacing;
-        Family::joist(kinds_, inputs, growing_section_)
-            .checks(limit, L, [&out](const Growth& demand, const Growth& resistance) {
-                *out++ = {demand, resistance};
-            });
+        return std::make_unique<FamilyGrowth<Family>>(kinds_, inputs, Family::section(kinds_, inputs));
     }
 
     [[nodiscard]] std::vector<Check<Traced>> trace(Limit limit, const Variation& variation,
@@ -171,8 +191,6 @@ private:
     Kinds kinds_;
     Inputs<double> inputs_;
     Section<double> section_;
-    Inputs<Growth> growing_;
-    Section<Growth> growing_section_;
 };
 
 } // namespace spanledger

@@ -89,7 +89,8 @@ private:
 
     std::string call(const char* name, const TraceNode& node) const {
         std::string text = std::string(name) + "(";
-        for (std::size_t i = 0; i < node.operands.size(); ++i) text += (i == 0 ? "" : ", ") + operand(*node.operands[i]);
+        for (std::size_t i = 0; i < node.operands.size(); ++i)
+            text += (i == 0 ? "" : ", ") + operand(*node.operands[i]);
         return text + ")";
     }
 
@@ -119,10 +120,16 @@ private:
 
 } // namespace
 
-std::vector<Trace> named_steps(const std::vector<Trace>& results) { return Steps().of(results); }
+std::vector<Trace> named_steps(const std::vector<Trace>& results) {
+    return Steps().of(results);
+}
 
-std::string formula_text(const TraceNode& node) { return Writer(false).expression(node); }
+std::string formula_text(const TraceNode& node) {
+    return Writer(false).expression(node);
+}
 
-std::string numbers_text(const TraceNode& node) { return Writer(true).expression(node); }
+std::string numbers_text(const TraceNode& node) {
+    return Writer(true).expression(node);
+}
 
 } // namespace spanledger

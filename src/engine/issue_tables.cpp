@@ -49,8 +49,7 @@ private:
 /// One cell of a kind that stands a section against a column.
 using ColumnCell = std::function<Cell(const ColumnHead&)>;
 
-ColumnCell column_cell(const Inputs& inputs, const TableRequest& request, const Member& member,
-                       const LoadClass& load) {
+ColumnCell column_cell(const Inputs& inputs, const TableRequest& request, const Member& member, const LoadClass& load) {
     if (request.kind == TableKind::permissible_load) {
         return [solver = std::make_shared<LoadSolver>(inputs, member, load)](const ColumnHead& column) {
             return solver->cell(column.spacing, *column.span);
@@ -64,11 +63,11 @@ ColumnCell column_cell(const Inputs& inputs, const TableRequest& request, const 
 }
 
 void sweep_row(const Inputs& inputs, const TableRequest& request, const Member& member, TableResult& table) {
+    const std::size_t columns_of_load = table.columns.size() / request.loads.size();
+    auto column = table.columns.begin();
     for (const std::string& load : request.loads) {
         const ColumnCell cell = column_cell(inputs, request, member, load_named(inputs.brief, load));
-        for (const ColumnHead& column : table.columns) {
-            if (column.load == load) table.cells.push_back(cell(column));
-        }
+        for (std::size_t i = 0; i < columns_of_load; ++i) table.cells.push_back(cell(*column++));
     }
 }
 

@@ -21,8 +21,10 @@ struct Example {
 };
 
 constexpr std::array examples{
-    Example{"C24 47x220", CompressionEdge::free},       Example{"GL24h 90x315", CompressionEdge::free},
-    Example{"LVL48P 45x240", CompressionEdge::free},    Example{"S275 UB 203x133x25", CompressionEdge::free},
+    Example{"C24 47x220", CompressionEdge::free},
+    Example{"GL24h 90x315", CompressionEdge::free},
+    Example{"LVL48P 45x240", CompressionEdge::free},
+    Example{"S275 UB 203x133x25", CompressionEdge::free},
     Example{"S350GD C 200x60x20x2 r2", CompressionEdge::held},
 };
 
@@ -37,12 +39,8 @@ Inputs example_inputs(const Catalogue& catalogue, CompressionEdge edge) {
     brief.limits.final_deflection = DeflectionLimit{.ratio = 250.0, .max_mm = {}};
     brief.limits.frequency = FrequencyLimit{};
     brief.limits.unit_load_deflection = 1.0;
-    brief.limits.vibration = VibrationLimit{.rule = VibrationRuleSet::uk,
-                                            .floor_width = 4000.0,
-                                            .a_mm = {},
-                                            .b = {},
-                                            .damping = {},
-                                            .kamp = {}};
+    brief.limits.vibration = VibrationLimit{
+        .rule = VibrationRuleSet::uk, .floor_width = 4000.0, .a_mm = {}, .b = {}, .damping = {}, .kamp = {}};
     LoadClass load;
     load.name = "floor";
     load.category = "A";
@@ -77,8 +75,9 @@ public:
         statement_.assumptions = {"g = 9.81 m/s2; first-generation Eurocodes", rules_->span_rule()};
         if (!plan.when_failing.empty()) statement_.assumptions.push_back(plan.when_failing);
         if (iterated_) {
-            statement_.assumptions.emplace_back("the first two steps of an iteration are shown; it runs until it settles, "
-                                                "at most 50 steps");
+            statement_.assumptions.emplace_back(
+                "the first two steps of an iteration are shown; it runs until it settles, "
+                "at most 50 steps");
         }
         return std::move(statement_);
     }

@@ -48,7 +48,7 @@ PermissibleLoad LoadSolver::at(double spacing, double clear_span) const {
         result.limits[index_of(definition.limit)] = found;
         if (found.kind == LoadOutcome::Kind::fails_unloaded && result.reason.empty()) {
             result.governing = definition.limit;
-            result.reason = "no load: a limit fails without variable action";
+            result.reason = "a limit fails without variable action";
         }
     }
     if (!result.reason.empty()) return result;
@@ -86,7 +86,7 @@ Cell LoadSolver::cell(double spacing, double clear_span) const {
         cell.utilisation = appraisal.utilisation;
         return cell;
     }
-    cell.reason = "no load: a limit fails without variable action";
+    cell.reason = "a limit fails without variable action";
     return cell;
 }
 

@@ -25,7 +25,7 @@ struct RolledFamily {
         return {kinds, inputs, section};
     }
 
-    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, double L);
+    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, FactsAt at);
     static std::vector<double> breaks(const Kinds& kinds, const Inputs<double>& inputs, Limit limit);
     static bool is_cantilever(const Kinds& kinds) { return kinds.cantilever; }
     static double depth(const Inputs<double>& inputs) { return inputs.size.h; }
@@ -50,7 +50,9 @@ std::optional<double> bearing_length_needed(RolledInputs<double> inputs, double 
     return long_enough;
 }
 
-JoistFacts RolledFamily::facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, double L) {
+JoistFacts RolledFamily::facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist,
+                               FactsAt at) {
+    const double L = at.L;
     JoistFacts facts;
     if (!kinds.refusal.empty()) return facts;
     facts.deflections =
@@ -64,7 +66,7 @@ JoistFacts RolledFamily::facts(const Kinds& kinds, const Inputs<double>& inputs,
     facts.reactions = support_reactions(kinds, joist, L, kinds.cantilever);
     if (!kinds.cantilever && !kinds.web_stiffened) {
         facts.bearing_length_needed =
-            bearing_length_needed(inputs, joist.reaction(worst_combination(kinds, joist, L), L));
+            bearing_length_needed(inputs, joist.reaction(worst_combination(kinds, joist, L), L) / at.cap);
     }
     return facts;
 }

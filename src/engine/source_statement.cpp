@@ -34,8 +34,8 @@ private:
             if (s.key == from.source) source = s.edition.empty() ? s.title : s.title + ", " + s.edition;
         }
         if (!from.note.empty()) source += " (" + from.note + ")";
-        lines_.push_back({std::move(kind), std::move(item), std::move(value), std::move(source), from.seen,
-                          from.practice_own});
+        lines_.push_back(
+            {std::move(kind), std::move(item), std::move(value), std::move(source), from.seen, from.practice_own});
     }
 
     void members() {
@@ -64,8 +64,8 @@ private:
         const std::string thicker = g.f_y_40 ? fmt::format(", {} MPa above 16 up to 40 mm", *g.f_y_40) : "";
         add("steel grade", g.name, fmt::format("f_y {} MPa up to 16 mm thick{}", g.f_y_16, thicker), g.provenance);
         const RolledSection& s = member.section;
-        add("section", s.name,
-            fmt::format("h {}, b {}, t_w {}, t_f {}, r {} mm", s.h, s.b, s.t_w, s.t_f, s.r), s.provenance);
+        add("section", s.name, fmt::format("h {}, b {}, t_w {}, t_f {}, r {} mm", s.h, s.b, s.t_w, s.t_f, s.r),
+            s.provenance);
     }
 
     void add_member(const ColdFormedMember& member) {
@@ -110,7 +110,9 @@ private:
 
 } // namespace
 
-std::vector<SourceLine> source_lines(const Inputs& inputs) { return SourceList(inputs).lines(); }
+std::vector<SourceLine> source_lines(const Inputs& inputs) {
+    return SourceList(inputs).lines();
+}
 
 namespace {
 
@@ -133,11 +135,14 @@ void head_notes(const Inputs& inputs, const std::vector<const LoadClass*>& loads
     for (const LimitNote& note : table.limits) {
         const bool stock = note.limit == Limit::stock_length;
         if (note.status == LimitStatus::checked || note.limit == Limit::bending_with_shear) continue;
-        table.head_notes.push_back(fmt::format("{}: {}.", stock ? "Stock length" : "Not checked, " + std::string(definition_of(note.limit).name), note.reason));
+        table.head_notes.push_back(fmt::format(
+            "{}: {}.", stock ? "Stock length" : "Not checked, " + std::string(definition_of(note.limit).name),
+            note.reason));
     }
     for (const LoadClass* load : loads) {
         if (load->concentrated <= 0.0) {
-            table.head_notes.push_back(fmt::format("Not checked, concentrated load Qk: none stated for {}.", load->name));
+            table.head_notes.push_back(
+                fmt::format("Not checked, concentrated load Qk: none stated for {}.", load->name));
         } else if (!load->concentrated_in_deflection) {
             table.head_notes.push_back(fmt::format("{}: Qk {} kN, {} of it on one joist, in strength only.", load->name,
                                                    load->concentrated / 1000.0, load->concentrated_share));

@@ -25,7 +25,8 @@ public:
     CheckCurve(const Joist& joist, Limit limit, std::size_t part) : joist_(&joist), limit_(limit), part_(part) {}
 
     double operator()(double L) const {
-        std::array<Check<double>, greatest_checks> checks; // NOLINT(cppcoreguidelines-pro-type-member-init): written below
+        std::array<Check<double>, greatest_checks>
+            checks; // NOLINT(cppcoreguidelines-pro-type-member-init): written below
         joist_->checks(limit_, L, checks.data());
         return utilisation(checks[part_]);
     }
@@ -42,9 +43,9 @@ double crossing(const CheckCurve& u, double cap, SpanRange bracket) {
     const double at_low = excess(bracket.lower);
     if (at_low >= 0.0) return bracket.lower;
     std::uintmax_t iterations = 200;
-    const auto found = boost::math::tools::toms748_solve(excess, bracket.lower, bracket.upper, at_low,
-                                                         excess(bracket.upper),
-                                                         boost::math::tools::eps_tolerance<double>(50), iterations);
+    const auto found =
+        boost::math::tools::toms748_solve(excess, bracket.lower, bracket.upper, at_low, excess(bracket.upper),
+                                          boost::math::tools::eps_tolerance<double>(50), iterations);
     return excess(found.second) <= 0.0 ? found.second : found.first;
 }
 
@@ -57,8 +58,13 @@ std::optional<double> hidden_peak(const CheckCurve& u, double cap, SpanRange bet
 
 /// First crossing of a check of which nothing is known but that it is smooth within the range.
 std::optional<double> first_crossing_by_marching(const CheckCurve& u, double cap, SpanRange range, double at_lower) {
-    // Only a local maximum this close to the cap can hide a peak above it between two steps of the march.
+    // Only a local maximum this close to the cap can hide a peak above it between two steps of the march. The ends of
+    // the range count as maxima too: a peak may lie just inside.
     constexpr double peak_watch = 0.8;
+    const auto crossing_before_peak = [&](SpanRange between) -> std::optional<double> {
+        const auto top = hidden_peak(u, cap, between);
+        return top ? std::optional(crossing(u, cap, {between.lower, *top})) : std::nullopt;
+    };
     double previous = range.lower;
     double before_previous = range.lower;
     double at_previous = at_lower;
@@ -66,11 +72,8 @@ std::optional<double> first_crossing_by_marching(const CheckCurve& u, double cap
     while (previous < range.upper) {
         const double next = std::min(previous * march_ratio, range.upper);
         const double at_next = u(next);
-        const bool peak = at_previous >= at_before && at_previous >= at_next && at_previous > peak_watch * cap;
-        if (peak && previous > before_previous) {
-            if (const auto top = hidden_peak(u, cap, {before_previous, next})) {
-                return crossing(u, cap, {before_previous, *top});
-            }
+        if (at_previous >= at_before && at_previous >= at_next && at_previous > peak_watch * cap) {
+            if (const auto L = crossing_before_peak({before_previous, next})) return L;
         }
         if (at_next > cap) return crossing(u, cap, {previous, next});
         before_previous = previous;
@@ -78,7 +81,8 @@ std::optional<double> first_crossing_by_marching(const CheckCurve& u, double cap
         previous = next;
         at_previous = at_next;
     }
-    return std::nullopt;
+    const bool peak_at_end = at_previous >= at_before && at_previous > peak_watch * cap;
+    return peak_at_end ? crossing_before_peak({before_previous, range.upper}) : std::nullopt;
 }
 
 /// Largest span within the piece before the check exceeds the cap; empty where it does not. u(lower) <= cap.
@@ -103,10 +107,9 @@ std::optional<double> last_passing_span(const CheckCurve& u, const CheckShape& s
     return first_crossing_by_marching(u, cap, range, at_lower);
 }
 
-std::vector<CheckShape> shapes_of(const JoistRules& rules, Limit limit, SpanRange range, SpanRange spacings) {
-    std::vector<Check<Growth>> checks(rules.plan(limit).parts.size());
-    rules.growth(limit, Growth::constant_between(spacings.lower, spacings.upper),
-                 Growth::span_between(range.lower, range.upper), checks.data());
+std::vector<CheckShape> shapes_of(const JoistGrowth& growth, Limit limit, SpanRange range, std::size_t parts) {
+    std::vector<Check<Growth>> checks(parts);
+    growth.checks(limit, Growth::span_between(range.lower, range.upper), checks.data());
     std::vector<CheckShape> shapes;
     shapes.reserve(checks.size());
     for (const Check<Growth>& check : checks) {
@@ -162,17 +165,19 @@ double shortest_span(const Joist& joist, Limit limit, const Piece& piece, const 
 
 SpanSolver::SpanSolver(const JoistRules& rules, SpanRange range, SpanRange spacings, double cap)
     : rules_(&rules), range_(range), cap_(cap) {
+    const auto growth = rules.growth(Growth::constant_between(spacings.lower, spacings.upper));
     for (const LimitDefinition& definition : limit_definitions) {
         if (rules.plan(definition.limit).status == LimitStatus::checked) {
-            pieces_[index_of(definition.limit)] = pieces_of(rules, definition.limit, spacings);
+            pieces_[index_of(definition.limit)] = pieces_of(*growth, definition.limit);
         }
     }
 }
 
-std::vector<Piece> SpanSolver::pieces_of(const JoistRules& rules, Limit limit, SpanRange spacings) const {
-    std::vector<CheckShape> whole = shapes_of(rules, limit, range_, spacings);
+std::vector<Piece> SpanSolver::pieces_of(const JoistGrowth& growth, Limit limit) const {
+    const std::size_t parts = rules_->plan(limit).parts.size();
+    std::vector<CheckShape> whole = shapes_of(growth, limit, range_, parts);
     if (all_known(whole)) return {{range_, std::move(whole)}};
-    std::vector<double> breaks = rules.breaks(limit);
+    std::vector<double> breaks = rules_->breaks(limit);
     std::sort(breaks.begin(), breaks.end());
     std::vector<Piece> pieces;
     double from = range_.lower;
@@ -183,7 +188,7 @@ std::vector<Piece> SpanSolver::pieces_of(const JoistRules& rules, Limit limit, S
     }
     pieces.push_back({{from, range_.upper}, {}});
     for (Piece& piece : pieces) {
-        piece.shapes = shapes_of(rules, limit, piece.range, spacings);
+        piece.shapes = shapes_of(growth, limit, piece.range, parts);
     }
     return pieces;
 }

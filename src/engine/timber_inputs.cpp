@@ -18,12 +18,11 @@ struct KindParameters {
 KindParameters kind_parameters(Timber timber) {
     switch (timber) {
     case Timber::solid_softwood:
-        return {"gamma_M_solid", "k_cr_solid",        "kc90_solid",
-                "kh_solid_depth", "kh_solid_exponent", "kh_solid_cap"};
+        return {"gamma_M_solid", "k_cr_solid", "kc90_solid", "kh_solid_depth", "kh_solid_exponent", "kh_solid_cap"};
     case Timber::solid_hardwood:
         return {"gamma_M_solid", "k_cr_solid", "", "kh_solid_depth", "kh_solid_exponent", "kh_solid_cap"};
     case Timber::glulam:
-        return {"gamma_M_glulam", "k_cr_glulam",        "kc90_glulam",
+        return {"gamma_M_glulam",  "k_cr_glulam",        "kc90_glulam",
                 "kh_glulam_depth", "kh_glulam_exponent", "kh_glulam_cap"};
     case Timber::lvl: return {"gamma_M_lvl", "k_cr_lvl", "", "kh_lvl_depth", "", "kh_lvl_cap"};
     }
@@ -61,8 +60,8 @@ void fill_factors(TimberInputs<double>& x, const Inputs& inputs, const TimberCla
     x.k_c_90_max_t = parameter(catalogue, "kc90_glulam_max_length");
     x.contact_extra = parameter(catalogue, "kc90_extra_length");
     x.kh_depth = parameter(catalogue, keys.kh_depth);
-    x.kh_exponent = *keys.kh_exponent == '\0' ? timber_class.size_exponent.value_or(0.0)
-                                              : parameter(catalogue, keys.kh_exponent);
+    x.kh_exponent =
+        *keys.kh_exponent == '\0' ? timber_class.size_exponent.value_or(0.0) : parameter(catalogue, keys.kh_exponent);
     x.kh_cap = parameter(catalogue, keys.kh_cap);
     const ServiceFactors* factors =
         find_service_factors(catalogue, timber_class.timber, inputs.brief.basis.service_class);

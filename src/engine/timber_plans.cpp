@@ -51,7 +51,8 @@ private:
     void strength() {
         checked(Limit::bending, std::string(ec5) + "6.1.6", "MPa", combination_labels());
         checked(Limit::shear, std::string(ec5) + "6.1.7", "MPa", combination_labels());
-        not_applicable(Limit::bending_with_shear, "EN 1995-1-1", "EN 1995-1-1 has no interaction of bending with shear");
+        not_applicable(Limit::bending_with_shear, "EN 1995-1-1",
+                       "EN 1995-1-1 has no interaction of bending with shear");
         if (kinds_->cantilever) {
             not_applicable(Limit::bearing, std::string(ec5) + "6.1.5",
                            "cantilever: the bearing of the root and its hold-down are the reader's");
@@ -106,7 +107,7 @@ private:
             for (const Limit limit : limits) not_applicable(limit, std::string(ec5) + "7.3.3", reason);
             return;
         }
-        const bool no_mass = load_->permanent <= 0.0 && !kinds_->self_weight;
+        const bool no_mass = load_->permanent + load_->permanent_partitions <= 0.0 && !kinds_->self_weight;
         if (no_mass) {
             for (const Limit limit : limits) {
                 not_applicable(limit, std::string(ec5) + "7.3.3", "no permanent load: the floor has no mass");

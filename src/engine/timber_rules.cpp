@@ -24,7 +24,7 @@ struct TimberFamily {
         return {kinds, inputs};
     }
 
-    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, double L);
+    static JoistFacts facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, FactsAt at);
     static std::vector<double> breaks(const Kinds& kinds, const Inputs<double>& inputs, Limit limit);
     static bool is_cantilever(const Kinds& kinds) { return kinds.cantilever; }
     static double depth(const Inputs<double>& inputs) { return inputs.h; }
@@ -37,25 +37,27 @@ double bearing_length_for(double contact_length, double extra) {
 }
 
 double bearing_length_needed(const TimberKinds& kinds, const TimberInputs<double>& inputs,
-                             const TimberJoist<double>& joist, double L) {
+                             const TimberJoist<double>& joist, FactsAt at) {
     double contact = 0.0;
     for (std::size_t i = 0; i < kinds.combinations.size(); ++i) {
-        contact = std::max(contact, joist.reaction(i, L) / joist.bearing_resistance_per_length(i, L));
+        contact = std::max(contact, joist.reaction(i, at.L) / joist.bearing_resistance_per_length(i, at.L) / at.cap);
     }
     return bearing_length_for(contact, inputs.contact_extra);
 }
 
-JoistFacts TimberFamily::facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist, double L) {
+JoistFacts TimberFamily::facts(const Kinds& kinds, const Inputs<double>& inputs, const Joist<double>& joist,
+                               FactsAt at) {
+    const double L = at.L;
     JoistFacts facts;
-    facts.deflections = largest_deflections(
-        kinds.service, {"variable", "instantaneous", "final"}, [&](const ServiceCase& service) {
+    facts.deflections =
+        largest_deflections(kinds.service, {"variable", "instantaneous", "final"}, [&](const ServiceCase& service) {
             const auto w = joist.deflections(service, L);
             const double w_Q = w.w_partitions + w.w_Q;
             return std::vector{w_Q, w.w_G + w_Q, joist.net_final(service, L)};
         });
     if (!kinds.cantilever && joist.actions().permanent() > 0.0) facts.first_frequency = joist.first_frequency(L);
     facts.reactions = support_reactions(kinds, joist, L, kinds.cantilever);
-    if (!kinds.cantilever) facts.bearing_length_needed = bearing_length_needed(kinds, inputs, joist, L);
+    if (!kinds.cantilever) facts.bearing_length_needed = bearing_length_needed(kinds, inputs, joist, at);
     return facts;
 }
 

@@ -131,15 +131,18 @@ constexpr std::array loads{
 
 constexpr std::array members{
     KeyDefinition{.name = "name", .required = true, .meaning = "name of the entry, as in the tables' members"},
-    KeyDefinition{
-        .name = "class", .required = true, .meaning = "strength class, such as C24 (`spanledger catalogue classes`)"},
+    KeyDefinition{.name = "class",
+                  .required = true,
+                  .meaning = "strength class or grade, such as C24, S275 or S350GD (`spanledger catalogue classes`)"},
     KeyDefinition{.name = "series",
                   .needed_with = "no sizes",
                   .meaning = "a series of sections that can be bought (`spanledger catalogue series`)"},
     KeyDefinition{.name = "sizes",
                   .kind = texts,
                   .needed_with = "no series",
-                  .meaning = "sizes in mm, such as \"47x220\", or \"2/47x220\" for two plies"},
+                  .meaning =
+                      "sizes in mm, such as \"47x220\", or \"2/47x220\" for two plies; names such as \"IPE 200\"; "
+                      "lipped channels such as \"C 150x50x15x1.5 r2.5\""},
     KeyDefinition{.name = "plies",
                   .kind = whole_number,
                   .fallback = "1",

@@ -57,24 +57,16 @@ std::string example_number(const KeyDefinition& key) {
 
 std::string example_of(const KeyDefinition& key) {
     switch (key.kind) {
-    case ValueKind::yes_no:
-        return "true";
+    case ValueKind::yes_no: return "true";
     case ValueKind::number:
-    case ValueKind::whole_number:
-        return example_number(key);
-    case ValueKind::texts:
-        return "[\"...\"]";
-    case ValueKind::numbers:
-        return fmt::format("[{}]", example_number(key));
+    case ValueKind::whole_number: return example_number(key);
+    case ValueKind::texts: return "[\"...\"]";
+    case ValueKind::numbers: return fmt::format("[{}]", example_number(key));
     case ValueKind::choice:
-    case ValueKind::choice_or_file:
-        return fmt::format("\"{}\"", listed_words(key.choices).front());
-    case ValueKind::date:
-        return "2026-01-31";
-    case ValueKind::table:
-        return "{...}";
-    default:
-        return "\"...\"";
+    case ValueKind::choice_or_file: return fmt::format("\"{}\"", listed_words(key.choices).front());
+    case ValueKind::date: return "2026-01-31";
+    case ValueKind::table: return "{...}";
+    default: return "\"...\"";
     }
 }
 

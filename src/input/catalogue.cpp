@@ -14,10 +14,18 @@ namespace spanledger {
 
 namespace {
 
-constexpr std::array data_files{"cold-formed-grades.csv", "cold-formed-sections.csv", "combinations.csv",
-                                "load-categories.csv",    "parameter-values.csv",     "parameters.csv",
-                                "rolled-sections.csv",    "service-factors.csv",      "snow.csv",
-                                "sources.csv",            "steel-grades.csv",         "timber-classes.csv",
+constexpr std::array data_files{"cold-formed-grades.csv",
+                                "cold-formed-sections.csv",
+                                "combinations.csv",
+                                "load-categories.csv",
+                                "parameter-values.csv",
+                                "parameters.csv",
+                                "rolled-sections.csv",
+                                "service-factors.csv",
+                                "snow.csv",
+                                "sources.csv",
+                                "steel-grades.csv",
+                                "timber-classes.csv",
                                 "timber-series.csv"};
 
 RowFile builtin(const char* name) {
@@ -163,12 +171,9 @@ double parameter(const Catalogue& catalogue, std::string_view key) {
 std::string_view material_of(Timber timber) noexcept {
     switch (timber) {
     case Timber::solid_softwood:
-    case Timber::solid_hardwood:
-        return "solid timber";
-    case Timber::glulam:
-        return "glulam";
-    case Timber::lvl:
-        return "LVL";
+    case Timber::solid_hardwood: return "solid timber";
+    case Timber::glulam: return "glulam";
+    case Timber::lvl: return "LVL";
     }
     return "";
 }

@@ -35,28 +35,17 @@ std::string quoted_choices(const KeyDefinition& key) {
 
 std::string kind_words(const KeyDefinition& key) {
     switch (key.kind) {
-    case ValueKind::text:
-        return "text";
-    case ValueKind::long_text:
-        return "text, also of several lines";
-    case ValueKind::date:
-        return "date, yyyy-mm-dd";
-    case ValueKind::number:
-        return with_unit("number", key.measure);
-    case ValueKind::whole_number:
-        return "whole number";
-    case ValueKind::yes_no:
-        return "true or false";
-    case ValueKind::choice:
-        return quoted_choices(key);
-    case ValueKind::choice_or_file:
-        return quoted_choices(key) + ", or a file name ending in .toml";
-    case ValueKind::texts:
-        return "list of texts";
-    case ValueKind::numbers:
-        return with_unit("list of numbers", key.measure);
-    case ValueKind::table:
-        return fmt::format("{{...}}, see {}", key.table);
+    case ValueKind::text: return "text";
+    case ValueKind::long_text: return "text, also of several lines";
+    case ValueKind::date: return "date, yyyy-mm-dd";
+    case ValueKind::number: return with_unit("number", key.measure);
+    case ValueKind::whole_number: return "whole number";
+    case ValueKind::yes_no: return "true or false";
+    case ValueKind::choice: return quoted_choices(key);
+    case ValueKind::choice_or_file: return quoted_choices(key) + ", or a file name ending in .toml";
+    case ValueKind::texts: return "list of texts";
+    case ValueKind::numbers: return with_unit("list of numbers", key.measure);
+    case ValueKind::table: return fmt::format("{{...}}, see {}", key.table);
     }
     return {};
 }

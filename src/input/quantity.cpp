@@ -146,24 +146,15 @@ QuantityError wrong_unit(std::string_view text, std::string_view unit, Dimension
 
 std::string_view dimension_name(Dimension dimension) noexcept {
     switch (dimension) {
-    case Dimension::number:
-        return "number";
-    case Dimension::length:
-        return "length";
-    case Dimension::area_load:
-        return "load on an area";
-    case Dimension::line_load:
-        return "load on a line";
-    case Dimension::force:
-        return "force";
-    case Dimension::stress:
-        return "stress";
-    case Dimension::density:
-        return "density";
-    case Dimension::frequency:
-        return "frequency";
-    case Dimension::plate_stiffness:
-        return "stiffness of a width";
+    case Dimension::number: return "number";
+    case Dimension::length: return "length";
+    case Dimension::area_load: return "load on an area";
+    case Dimension::line_load: return "load on a line";
+    case Dimension::force: return "force";
+    case Dimension::stress: return "stress";
+    case Dimension::density: return "density";
+    case Dimension::frequency: return "frequency";
+    case Dimension::plate_stiffness: return "stiffness of a width";
     }
     return "";
 }

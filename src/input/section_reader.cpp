@@ -30,20 +30,13 @@ std::vector<std::string> key_names(const SectionDefinition& section) {
 std::string_view wanted_words(ValueKind kind) {
     switch (kind) {
     case ValueKind::number:
-    case ValueKind::whole_number:
-        return "a number";
-    case ValueKind::yes_no:
-        return "true or false";
-    case ValueKind::date:
-        return "a date";
-    case ValueKind::table:
-        return "{key = value, ...}";
-    case ValueKind::texts:
-        return "a text or a list of texts";
-    case ValueKind::numbers:
-        return "a number or a list of numbers";
-    default:
-        return "a text";
+    case ValueKind::whole_number: return "a number";
+    case ValueKind::yes_no: return "true or false";
+    case ValueKind::date: return "a date";
+    case ValueKind::table: return "{key = value, ...}";
+    case ValueKind::texts: return "a text or a list of texts";
+    case ValueKind::numbers: return "a number or a list of numbers";
+    default: return "a text";
     }
 }
 

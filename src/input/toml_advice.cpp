@@ -130,14 +130,10 @@ std::string plain_reason(std::string_view reason) {
 std::string closing_hint(std::string_view value) {
     switch (value.empty() ? ' ' : value.front()) {
     case '"':
-    case '\'':
-        return "close the text with the quote it began with; a backslash in double quotes is written \\\\";
-    case '[':
-        return "part the values of a list by commas and close it with ]";
-    case '{':
-        return "write {key = value, key = value} in one line, closed with }";
-    default:
-        return "write key = value, [section], or [[section]] for one of several; a remark begins with #";
+    case '\'': return "close the text with the quote it began with; a backslash in double quotes is written \\\\";
+    case '[': return "part the values of a list by commas and close it with ]";
+    case '{': return "write {key = value, key = value} in one line, closed with }";
+    default: return "write key = value, [section], or [[section]] for one of several; a remark begins with #";
     }
 }
 

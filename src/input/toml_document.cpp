@@ -20,20 +20,13 @@ const Node* find(const Node& table, std::string_view key) {
 
 std::string_view kind_name(NodeKind kind) noexcept {
     switch (kind) {
-    case NodeKind::text:
-        return "a text";
-    case NodeKind::number:
-        return "a number";
-    case NodeKind::boolean:
-        return "true or false";
-    case NodeKind::date:
-        return "a date";
-    case NodeKind::array:
-        return "a list";
-    case NodeKind::table:
-        return "a table";
-    case NodeKind::unread:
-        return "unreadable";
+    case NodeKind::text: return "a text";
+    case NodeKind::number: return "a number";
+    case NodeKind::boolean: return "true or false";
+    case NodeKind::date: return "a date";
+    case NodeKind::array: return "a list";
+    case NodeKind::table: return "a table";
+    case NodeKind::unread: return "unreadable";
     }
     return "";
 }

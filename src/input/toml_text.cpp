@@ -31,19 +31,13 @@ std::optional<ParseFailure> try_parse(const std::string& text, ::toml::table& re
 
 NodeKind kind_of(const ::toml::node& node) {
     switch (node.type()) {
-    case ::toml::node_type::string:
-        return NodeKind::text;
+    case ::toml::node_type::string: return NodeKind::text;
     case ::toml::node_type::integer:
-    case ::toml::node_type::floating_point:
-        return NodeKind::number;
-    case ::toml::node_type::boolean:
-        return NodeKind::boolean;
-    case ::toml::node_type::array:
-        return NodeKind::array;
-    case ::toml::node_type::table:
-        return NodeKind::table;
-    default:
-        return NodeKind::date;
+    case ::toml::node_type::floating_point: return NodeKind::number;
+    case ::toml::node_type::boolean: return NodeKind::boolean;
+    case ::toml::node_type::array: return NodeKind::array;
+    case ::toml::node_type::table: return NodeKind::table;
+    default: return NodeKind::date;
     }
 }
 

@@ -8,6 +8,7 @@
 #include <array>
 #include <filesystem>
 #include <future>
+#include <utility>
 
 namespace spanledger {
 namespace {
@@ -45,7 +46,8 @@ public:
             if (file->problem()) return file->problem();
         }
         std::future<Texts> making = std::async(std::launch::async, [this] {
-            return Texts{issue_record(*issue_), issue_csv(*issue_)};
+            IssueRecord record = issue_record(*issue_);
+            return record.finite ? Texts{std::move(record), issue_csv(*issue_)} : Texts{std::move(record), {}};
         });
         Texts texts;
         const auto fingerprint = [&] {

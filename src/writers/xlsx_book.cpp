@@ -1,20 +1,26 @@
 // SPDX-License-Identifier: MIT
 #include "spanledger/writers/xlsx_book.hpp"
 
-#include "xlsx_state.hpp"
-
 #include "utf8_bytes.hpp"
+#include "xlsx_header.hpp"
+#include "xlsx_state.hpp"
 
 #include <fmt/format.h>
 #include <xlsxwriter.h>
 
 #include <algorithm>
+#include <cerrno>
 #include <charconv>
 #include <chrono>
 #include <cmath>
+#include <cstdio>
 #include <ctime>
-#include <deque>
 #include <new>
+#include <system_error>
+#include <utility>
+
+#include <fcntl.h>
+#include <unistd.h>
 
 namespace spanledger::xlsx {
 
@@ -47,42 +53,6 @@ std::string shortened(const std::string& text, std::size_t bytes) {
     std::size_t end = bytes;
     while (end > 0 && continues_character(text[end])) --end;
     return text.substr(0, end);
-}
-
-/// A part of a header or footer: & begins a code there. What is too long ends with a sign that says so.
-std::string header_part(const std::string& words) {
-    constexpr std::size_t longest_part = 69; // bytes: with the sign and the codes, three parts fit in 255
-    std::string_view rest = words;
-    std::string coded;
-    const auto take = [&rest](std::string_view words_taken) {
-        const bool there = rest.starts_with(words_taken);
-        if (there) rest.remove_prefix(words_taken.size());
-        return there;
-    };
-    while (!rest.empty()) {
-        std::string next;
-        if (take("&[page]")) {
-            next = "&P";
-        } else if (take("&[pages]")) {
-            next = "&N";
-        } else if (take("&")) {
-            next = "&&";
-        } else {
-            next = rest.substr(0, first_character_bytes(rest));
-            rest.remove_prefix(next.size());
-        }
-        if (coded.size() + next.size() > longest_part) return coded + "…";
-        coded += next;
-    }
-    return coded;
-}
-
-std::string header_text(const PageWords& words) {
-    // The blank after the size keeps a number that the words begin with apart from it.
-    const auto part = [](const char* place, const std::string& text) {
-        return text.empty() ? std::string() : fmt::format("&{}&\"{}\"&8 {}", place, font_name, header_part(text));
-    };
-    return part("L", words.left) + part("C", words.centre) + part("R", words.right);
 }
 
 struct LineLook {
@@ -140,6 +110,28 @@ std::string reference_to(const std::string& sheet) {
     std::string quoted;
     for (const char c : sheet) quoted += c == '\'' ? std::string("''") : std::string(1, c);
     return fmt::format("internal:'{}'!A1", quoted);
+}
+
+struct CloseResult {
+    lxw_error code = LXW_NO_ERROR;
+    int system_error = 0;
+};
+
+/// The library has words of its own for standard error when closing fails; the user gets the program's instead.
+CloseResult quietly_closed(lxw_workbook* workbook) {
+    std::fflush(stderr);
+    const int standard_error = ::dup(STDERR_FILENO);
+    const int nowhere = ::open("/dev/null", O_WRONLY | O_CLOEXEC);
+    if (standard_error >= 0 && nowhere >= 0) ::dup2(nowhere, STDERR_FILENO);
+    errno = 0;
+    CloseResult result;
+    result.code = workbook_close(workbook);
+    result.system_error = errno;
+    std::fflush(stderr);
+    if (standard_error >= 0) ::dup2(standard_error, STDERR_FILENO);
+    if (standard_error >= 0) ::close(standard_error);
+    if (nowhere >= 0) ::close(nowhere);
+    return result;
 }
 
 lxw_worksheet* worksheet(void* handle) {
@@ -201,8 +193,8 @@ void Sheet::set_up(const PageSetUp& page) {
     worksheet_freeze_panes(sheet, page.frozen.row, column_of(page.frozen));
     lxw_header_footer_options margin = {};
     margin.margin = 0.3;
-    book_->check(worksheet_set_header_opt(sheet, header_text(page.header).c_str(), &margin), "the header");
-    book_->check(worksheet_set_footer_opt(sheet, header_text(page.footer).c_str(), &margin), "the footer");
+    book_->check(worksheet_set_header_opt(sheet, header_text(page.header, font_name).c_str(), &margin), "the header");
+    book_->check(worksheet_set_footer_opt(sheet, header_text(page.footer, font_name).c_str(), &margin), "the footer");
     book_->check(worksheet_repeat_rows(sheet, page.first_repeated_row, page.last_repeated_row), "the repeated rows");
     book_->check(worksheet_print_area(sheet, page.print_area.first.row, column_of(page.print_area.first),
                                       page.print_area.last.row, column_of(page.print_area.last)),
@@ -267,7 +259,11 @@ void Book::property(const std::string& name, const std::string& value) {
 
 WriteResult Book::close() {
     if (state_->problem) return state_->problem;
-    state_->check(workbook_close(std::exchange(state_->workbook, nullptr)), "the workbook");
+    const CloseResult closed = quietly_closed(std::exchange(state_->workbook, nullptr));
+    if (closed.code != LXW_NO_ERROR && closed.system_error != 0) {
+        state_->report(std::generic_category().message(closed.system_error));
+    }
+    state_->check(closed.code, "the workbook");
     if (state_->problem) return state_->problem;
     return check_parts(state_->file);
 }

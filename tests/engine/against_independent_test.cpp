@@ -22,8 +22,7 @@ bool same(double a, double b, double relative) {
 
 /// 1e-12, but where (40/f1)^2 - 1 nearly cancels in the velocity response the last digits of f1 count for more.
 double tolerance(const independent::Case& c, Limit limit, double L) {
-    if (limit != Limit::velocity_response)
-        return 1e-12;
+    if (limit != Limit::velocity_response) return 1e-12;
     const double left = std::abs(40.0 / independent::frequency(c, L) - 1.0);
     return 1e-12 * std::max(1.0, 0.01 / left);
 }
@@ -47,8 +46,7 @@ TEST_CASE("the same limits are active, with the same utilisation, as in an indep
             INFO("case " << i << ": " << independent::describe(c) << " L " << L << ", " << definition.name);
             const bool checked = rules->plan(definition.limit).status == LimitStatus::checked;
             REQUIRE(checked == independent::active(c, definition.limit));
-            if (!checked)
-                continue;
+            if (!checked) continue;
             const double ours = engine_utilisation(*rules, *joist, definition.limit, L);
             const double theirs = independent::utilisation(c, definition.limit, L);
             if (!same(ours, theirs, tolerance(c, definition.limit, L))) {
@@ -63,13 +61,10 @@ namespace {
 
 double engine_first_failure(const LimitOutcome& outcome, const JoistRules& rules) {
     switch (outcome.kind) {
-    case LimitOutcome::Kind::spans:
-        return outcome.clear_span + rules.span_addition();
-    case LimitOutcome::Kind::never_reached:
-        return HUGE_VAL;
+    case LimitOutcome::Kind::spans: return outcome.clear_span + rules.span_addition();
+    case LimitOutcome::Kind::never_reached: return HUGE_VAL;
     case LimitOutcome::Kind::fails_at_once:
-    case LimitOutcome::Kind::not_checked:
-        break;
+    case LimitOutcome::Kind::not_checked: break;
     }
     return 0.0;
 }
@@ -92,8 +87,7 @@ TEST_CASE("every limit's permissible span is the first crossing that a slow scan
         const CellSolver solver(engine.inputs, engine.member, engine.load(), {c.spacing, c.spacing});
         const Cell cell = solver.permissible_span(c.spacing);
         for (const LimitDefinition& definition : limit_definitions) {
-            if (!independent::active(c, definition.limit))
-                continue;
+            if (!independent::active(c, definition.limit)) continue;
             INFO("case " << i << ": " << independent::describe(c) << ", " << definition.name);
             const double ours = engine_first_failure(cell.limits[index_of(definition.limit)], solver.rules());
             const double theirs = independent::first_failure(c, definition.limit, 10.0);

@@ -18,11 +18,9 @@ constexpr double step = 10.0; // mm, the default of a table
 bool passes_everywhere(const independent::Case& c, double clear_span) {
     const double L = clear_span + independent::span_addition(c);
     for (const LimitDefinition& definition : limit_definitions) {
-        if (!independent::active(c, definition.limit))
-            continue;
+        if (!independent::active(c, definition.limit)) continue;
         const double cap = definition.limit == Limit::stock_length ? 1.0 : c.cap;
-        if (!(independent::utilisation(c, definition.limit, L) <= cap * (1.0 + 1e-12)))
-            return false;
+        if (!(independent::utilisation(c, definition.limit, L) <= cap * (1.0 + 1e-12))) return false;
     }
     return true;
 }
@@ -32,8 +30,7 @@ std::array<double, limit_count> first_failures(const independent::Case& c) {
     std::array<double, limit_count> spans{};
     spans.fill(HUGE_VAL);
     for (const LimitDefinition& definition : limit_definitions) {
-        if (!independent::active(c, definition.limit))
-            continue;
+        if (!independent::active(c, definition.limit)) continue;
         spans[index_of(definition.limit)] = independent::first_failure(c, definition.limit, 10.0);
     }
     return spans;
@@ -99,13 +96,11 @@ TEST_CASE("a printed cell's utilisation is the largest at the printed span and w
         independent::Case c = independent::random_case(random);
         c.stock.reset();
         const Cell cell = cell_of(c);
-        if (!cell.value)
-            continue;
+        if (!cell.value) continue;
         INFO("case " << i << ": " << independent::describe(c));
         double largest = 0.0;
         for (const LimitDefinition& definition : limit_definitions) {
-            if (!independent::active(c, definition.limit))
-                continue;
+            if (!independent::active(c, definition.limit)) continue;
             const double L = *cell.value + independent::span_addition(c);
             largest = std::max(largest, independent::utilisation(c, definition.limit, L));
         }

@@ -84,7 +84,7 @@ TEST_CASE("channels outside the arrangement are refused", "[cold-formed]") {
     free.brief.support.restraint_spacing = 600.0;
     CHECK_THAT(refusal(free, channel(usual)), Catch::Contains("compression flange"));
     const auto rules = rules_of(free, channel(usual));
-    const JoistFacts facts = rules->at({.spacing = 600, .variable = 0.0015})->facts(4000);
+    const JoistFacts facts = rules->at({.spacing = 600, .variable = 0.0015})->facts(4000, 1.0);
     CHECK(facts.deflections.empty());
     CHECK(facts.reactions.empty());
 }
@@ -128,7 +128,7 @@ TEST_CASE("a web that is not stiffened has closer limits", "[cold-formed]") {
         CHECK(refusal(cleated, channel(size)).empty());
         const auto rules = rules_of(cleated, channel(size));
         CHECK(rules->plan(Limit::bearing).status == LimitStatus::not_applicable);
-        CHECK_FALSE(rules->at({.spacing = 600, .variable = 0.0015})->facts(4000).bearing_length_needed);
+        CHECK_FALSE(rules->at({.spacing = 600, .variable = 0.0015})->facts(4000, 1.0).bearing_length_needed);
     }
     LippedChannelSize edge = deep;
     edge.h = 393.9;
@@ -170,7 +170,7 @@ TEST_CASE("the bearing length needed is where the reaction meets its resistance"
     load.concentrated = 4500.0;
     const double L = 5000.0;
     const Variation variation{.spacing = 600, .variable = load.variable};
-    const auto needed = rules_of(inputs, channel(usual), load)->at(variation)->facts(L).bearing_length_needed;
+    const auto needed = rules_of(inputs, channel(usual), load)->at(variation)->facts(L, 1.0).bearing_length_needed;
     REQUIRE(needed);
     REQUIRE(*needed > 1.0);
     inputs.brief.support.bearing = *needed;

@@ -16,8 +16,7 @@ inline const spanledger::Catalogue& built_in_catalogue(double xi) {
     const auto load = [](const char* set) {
         spanledger::Diagnostics diagnostics;
         auto catalogue = spanledger::load_catalogue({}, set, ".", diagnostics);
-        if (diagnostics.has_errors())
-            throw std::runtime_error("the built-in catalogue has errors");
+        if (diagnostics.has_errors()) throw std::runtime_error("the built-in catalogue has errors");
         return catalogue;
     };
     static const spanledger::Catalogue recommended = load("recommended");
@@ -49,8 +48,7 @@ inline spanledger::TimberMember engine_member(const Case& c) {
     member.timber_class.G_05 = m.G05;
     member.timber_class.rho_k = m.rho_k;
     member.timber_class.rho_mean = m.rho_mean;
-    if (m.kind == Kind::lvl)
-        member.timber_class.size_exponent = m.s;
+    if (m.kind == Kind::lvl) member.timber_class.size_exponent = m.s;
     member.b = c.b;
     member.h = c.h;
     member.plies = c.plies;
@@ -107,12 +105,10 @@ inline void fill_limits(const Case& c, spanledger::Brief& brief) {
     auto& limits = brief.limits;
     const std::array targets{&limits.variable_deflection, &limits.instantaneous_deflection, &limits.final_deflection};
     for (std::size_t i = 0; i < targets.size(); ++i) {
-        if (c.deflection[i])
-            *targets[i] = spanledger::DeflectionLimit{c.deflection[i]->ratio, c.deflection[i]->length};
+        if (c.deflection[i]) *targets[i] = spanledger::DeflectionLimit{c.deflection[i]->ratio, c.deflection[i]->length};
     }
     limits.camber = c.camber;
-    if (c.vibration == Vibration::none)
-        return;
+    if (c.vibration == Vibration::none) return;
     spanledger::VibrationLimit vibration;
     vibration.floor_width = c.floor_width;
     vibration.strutting = c.strutting;

@@ -35,8 +35,7 @@ inline double unit_deflection(const Case& c, double L) { // mm under 1 kN
 }
 
 inline double unit_deflection_limit(const Case& c, double L) {
-    if (c.vibration == Vibration::recommended)
-        return c.a;
+    if (c.vibration == Vibration::recommended) return c.a;
     return L <= 4000.0 ? 1.8 : 16500.0 / std::pow(L, 1.1);
 }
 
@@ -69,56 +68,35 @@ using spanledger::Limit;
 inline bool active(const Case& c, Limit limit) {
     switch (limit) {
     case Limit::bending:
-    case Limit::shear:
-        return true;
-    case Limit::bearing:
-        return !c.cantilever;
-    case Limit::lateral_buckling:
-        return !c.held;
-    case Limit::variable_deflection:
-        return c.deflection[0].has_value();
-    case Limit::instantaneous_deflection:
-        return c.deflection[1].has_value();
-    case Limit::final_deflection:
-        return c.deflection[2].has_value();
+    case Limit::shear: return true;
+    case Limit::bearing: return !c.cantilever;
+    case Limit::lateral_buckling: return !c.held;
+    case Limit::variable_deflection: return c.deflection[0].has_value();
+    case Limit::instantaneous_deflection: return c.deflection[1].has_value();
+    case Limit::final_deflection: return c.deflection[2].has_value();
     case Limit::frequency:
     case Limit::unit_load_deflection:
-    case Limit::velocity_response:
-        return c.vibration != Vibration::none && !c.cantilever;
-    case Limit::stock_length:
-        return c.stock.has_value();
-    case Limit::bending_with_shear:
-        return false;
+    case Limit::velocity_response: return c.vibration != Vibration::none && !c.cantilever;
+    case Limit::stock_length: return c.stock.has_value();
+    case Limit::bending_with_shear: return false;
     }
     return false;
 }
 
 inline double utilisation(const Case& c, Limit limit, double L) {
     switch (limit) {
-    case Limit::bending:
-        return bending(c, L);
-    case Limit::shear:
-        return shear(c, L);
-    case Limit::bearing:
-        return bearing(c, L);
-    case Limit::lateral_buckling:
-        return lateral_buckling(c, L);
-    case Limit::variable_deflection:
-        return deflection_limit(c, L, 0);
-    case Limit::instantaneous_deflection:
-        return deflection_limit(c, L, 1);
-    case Limit::final_deflection:
-        return deflection_limit(c, L, 2);
-    case Limit::frequency:
-        return 8.0 / frequency(c, L);
-    case Limit::unit_load_deflection:
-        return unit_deflection(c, L) / unit_deflection_limit(c, L);
-    case Limit::velocity_response:
-        return velocity(c, L) / velocity_limit(c, L);
-    case Limit::stock_length:
-        return (L + c.bearing) / *c.stock; // Lc + 2t
-    case Limit::bending_with_shear:
-        break;
+    case Limit::bending: return bending(c, L);
+    case Limit::shear: return shear(c, L);
+    case Limit::bearing: return bearing(c, L);
+    case Limit::lateral_buckling: return lateral_buckling(c, L);
+    case Limit::variable_deflection: return deflection_limit(c, L, 0);
+    case Limit::instantaneous_deflection: return deflection_limit(c, L, 1);
+    case Limit::final_deflection: return deflection_limit(c, L, 2);
+    case Limit::frequency: return 8.0 / frequency(c, L);
+    case Limit::unit_load_deflection: return unit_deflection(c, L) / unit_deflection_limit(c, L);
+    case Limit::velocity_response: return velocity(c, L) / velocity_limit(c, L);
+    case Limit::stock_length: return (L + c.bearing) / *c.stock; // Lc + 2t
+    case Limit::bending_with_shear: break;
     }
     return 0.0;
 }
@@ -138,8 +116,7 @@ inline double first_failure(const Case& c, Limit limit, double step) {
     const double cap = limit == Limit::stock_length ? 1.0 : c.cap;
     const double upper = upper_bound(c);
     double passing = lower_bound(c);
-    if (!(utilisation(c, limit, passing) <= cap))
-        return 0.0;
+    if (!(utilisation(c, limit, passing) <= cap)) return 0.0;
     while (passing < upper) {
         double failing = std::min(passing + step, upper);
         if (utilisation(c, limit, failing) <= cap) {

@@ -18,10 +18,8 @@ namespace {
 std::optional<double> span_at_slenderness(const independent::Case& c, double lambda) {
     double low = independent::lower_bound(c);
     double high = independent::upper_bound(c);
-    if (independent::relative_slenderness(c, low, false) >= lambda)
-        return std::nullopt;
-    if (independent::relative_slenderness(c, high, false) <= lambda)
-        return std::nullopt;
+    if (independent::relative_slenderness(c, low, false) >= lambda) return std::nullopt;
+    if (independent::relative_slenderness(c, high, false) <= lambda) return std::nullopt;
     while (high - low > 1e-9) {
         const double middle = 0.5 * (low + high);
         (independent::relative_slenderness(c, middle, false) < lambda ? low : high) = middle;
@@ -35,8 +33,7 @@ std::optional<independent::Case> just_exceeded(independent::Random& random, doub
     c.held = false;
     c.restraint.reset();
     const auto L = span_at_slenderness(c, lambda);
-    if (!L)
-        return std::nullopt;
+    if (!L) return std::nullopt;
     const double before = independent::utilisation(c, Limit::lateral_buckling, *L - 1e-6);
     c.cap = before * (1.0 - random.between(2e-5, 3e-4));
     return c;
@@ -50,15 +47,13 @@ TEST_CASE("a failure in the last millimetre before a step of kcrit is found") {
     while (cases < 300) {
         const double lambda = random.one_of({0.75, 1.4});
         const auto c = just_exceeded(random, lambda);
-        if (!c)
-            continue;
+        if (!c) continue;
         ++cases;
         INFO(independent::describe(*c) << " lambda " << lambda);
         const double L = *span_at_slenderness(*c, lambda);
         double expected = L - 5.0;
         REQUIRE(independent::utilisation(*c, Limit::lateral_buckling, expected) <= c->cap);
-        while (independent::utilisation(*c, Limit::lateral_buckling, expected + 0.002) <= c->cap)
-            expected += 0.002;
+        while (independent::utilisation(*c, Limit::lateral_buckling, expected + 0.002) <= c->cap) expected += 0.002;
         const auto engine = independent::to_engine(*c);
         const CellSolver solver(engine.inputs, engine.member, engine.load(), {c->spacing, c->spacing});
         const LimitOutcome found = solver.permissible_span(c->spacing).limits[index_of(Limit::lateral_buckling)];

@@ -18,11 +18,9 @@ constexpr double load_step = 1e-5; // N/mm2: 0.01 kN/m2
 bool carries(independent::Case c, double q, double L) {
     c.loads.q = q;
     for (const LimitDefinition& definition : limit_definitions) {
-        if (!independent::active(c, definition.limit))
-            continue;
+        if (!independent::active(c, definition.limit)) continue;
         const double cap = definition.limit == Limit::stock_length ? 1.0 : c.cap;
-        if (!(independent::utilisation(c, definition.limit, L) <= cap * (1.0 + 1e-12)))
-            return false;
+        if (!(independent::utilisation(c, definition.limit, L) <= cap * (1.0 + 1e-12))) return false;
     }
     return true;
 }
@@ -46,15 +44,14 @@ TEST_CASE("the permissible load is carried and a little more is not") {
             ++none;
             CHECK(!carries(c, 0.0, L));
             CHECK(!cell.value);
-            CHECK(cell.reason == "no load: a limit fails without variable action");
+            CHECK(cell.reason == "a limit fails without variable action");
             continue;
         }
         ++found;
         CHECK(carries(c, *load.variable * (1.0 - 1e-9), L));
         REQUIRE(cell.value);
         CHECK(carries(c, *cell.value, L));
-        if (!load.governing)
-            continue;
+        if (!load.governing) continue;
         CHECK(!carries(c, *load.variable * (1.0 + 1e-9) + 1e-12, L));
         CHECK(*cell.value <= *load.variable + 1e-12);
         CHECK(*cell.value > *load.variable - load_step - 1e-12);
@@ -70,8 +67,7 @@ TEST_CASE("the limit that governs a permissible load is the one that fails just 
         const double clear_span = random.between(1000, 6000);
         const auto engine = independent::to_engine(c);
         const PermissibleLoad load = LoadSolver(engine.inputs, engine.member, engine.load()).at(c.spacing, clear_span);
-        if (!load.variable || !load.governing)
-            continue;
+        if (!load.variable || !load.governing) continue;
         INFO("case " << i << ": " << independent::describe(c) << " clear span " << clear_span);
         const double L = clear_span + independent::span_addition(c);
         c.loads.q = *load.variable * (1.0 + 1e-9) + 1e-12;

@@ -43,8 +43,7 @@ inline Timber random_timber(Random& r) {
     m.E = r.between(7000, 17000);
     m.E05 = m.E * r.between(0.6, 0.9);
     m.G = m.E / r.between(14, 22);
-    if (m.kind == Kind::glulam || m.kind == Kind::lvl)
-        m.G05 = m.G * r.between(0.6, 0.9);
+    if (m.kind == Kind::glulam || m.kind == Kind::lvl) m.G05 = m.G * r.between(0.6, 0.9);
     m.rho_k = m.kind == Kind::hardwood ? r.between(475, 900) : r.between(290, 520);
     m.rho_mean = m.rho_k * r.between(1.0, 1.25);
     m.s = r.between(0.0, 0.2);
@@ -54,16 +53,11 @@ inline Timber random_timber(Random& r) {
 inline Loads random_loads(Random& r) {
     Loads l;
     l.g = r.between(0.0002, 0.002);
-    if (r.chance(0.3))
-        l.g_partitions = r.between(0.0001, 0.001);
-    if (r.chance(0.85))
-        l.q = r.between(0.0004, 0.006);
-    if (r.chance(0.3))
-        l.partitions = r.between(0.0003, 0.0012);
-    if (r.chance(0.2))
-        l.snow = r.between(0.0004, 0.004);
-    if (r.chance(0.5))
-        l.Q = r.between(900, 4500);
+    if (r.chance(0.3)) l.g_partitions = r.between(0.0001, 0.001);
+    if (r.chance(0.85)) l.q = r.between(0.0004, 0.006);
+    if (r.chance(0.3)) l.partitions = r.between(0.0003, 0.0012);
+    if (r.chance(0.2)) l.snow = r.between(0.0004, 0.004);
+    if (r.chance(0.5)) l.Q = r.between(900, 4500);
     l.share = r.one_of({1.0, 1.0, r.between(0.3, 0.99)});
     l.q_duration = r.whole(1, 3);
     l.snow_duration = r.whole(1, 4);
@@ -79,20 +73,15 @@ inline Loads random_loads(Random& r) {
 inline void random_limits(Random& r, Case& c) {
     const std::array<double, 3> ratios{r.between(250, 500), r.between(200, 450), r.between(150, 350)};
     for (std::size_t i = 0; i < ratios.size(); ++i) {
-        if (!r.chance(0.6))
-            continue;
+        if (!r.chance(0.6)) continue;
         DeflectionLimit limit{ratios[i], std::nullopt};
         const int form = r.whole(0, 2);
-        if (form > 0)
-            limit.length = r.between(6, 40);
-        if (form == 2)
-            limit.ratio.reset();
+        if (form > 0) limit.length = r.between(6, 40);
+        if (form == 2) limit.ratio.reset();
         c.deflection[i] = limit;
     }
-    if (c.deflection[2] && r.chance(0.3))
-        c.camber = r.between(1, 30);
-    if (c.cantilever)
-        return;
+    if (c.deflection[2] && r.chance(0.3)) c.camber = r.between(1, 30);
+    if (c.cantilever) return;
     c.vibration = r.one_of({Vibration::none, Vibration::uk, Vibration::recommended});
     c.floor_width = r.between(2500, 12000);
     c.deck_stiffness = std::pow(10.0, r.between(7.5, 12.5));
@@ -104,11 +93,9 @@ inline void random_limits(Random& r, Case& c) {
 inline void random_support(Random& r, Case& c) {
     c.cantilever = r.chance(0.15);
     c.bearing = r.between(20, 150);
-    if (c.timber.kind == Kind::glulam && r.chance(0.2))
-        c.bearing = r.between(300, 500);
+    if (c.timber.kind == Kind::glulam && r.chance(0.2)) c.bearing = r.between(300, 500);
     c.held = r.chance(0.3);
-    if (!c.held && !c.cantilever)
-        c.restraint = r.maybe(0.3, 300, 4000);
+    if (!c.held && !c.cantilever) c.restraint = r.maybe(0.3, 300, 4000);
     c.position = r.one_of({Position::top, Position::centroid, Position::bottom});
     if (!c.cantilever) {
         c.concentrated_near = r.chance(0.3);

@@ -162,7 +162,7 @@ TEST_CASE("camber takes from the instantaneous deflection only, and leaves no le
     auto engine = ipe_200();
     const auto deflections = [&] {
         const auto rules = engine.rules();
-        return rules->at({.spacing = 600.0, .variable = 0.0025})->facts(5000.0).deflections;
+        return rules->at({.spacing = 600.0, .variable = 0.0025})->facts(5000.0, 1.0).deflections;
     };
     const auto before = deflections();
     engine.inputs.brief.limits.camber = 3.0;
@@ -181,7 +181,7 @@ TEST_CASE("the bearing length needed is the one at which the web just resists th
         return engine.rules();
     };
     const auto rules = joist_on(50.0);
-    const auto needed = rules->at({.spacing = 1500.0, .variable = 0.03})->facts(3500.0).bearing_length_needed;
+    const auto needed = rules->at({.spacing = 1500.0, .variable = 0.03})->facts(3500.0, 1.0).bearing_length_needed;
     REQUIRE(needed.has_value());
     CHECK(*needed > 10.0);
     const auto utilisation_on = [&](double bearing) {

@@ -12,8 +12,7 @@ namespace {
 
 std::array<std::optional<double>, limit_count> spans(std::initializer_list<std::pair<Limit, double>> given) {
     std::array<std::optional<double>, limit_count> left;
-    for (const auto& [limit, span] : given)
-        left[index_of(limit)] = span;
+    for (const auto& [limit, span] : given) left[index_of(limit)] = span;
     return left;
 }
 

@@ -17,17 +17,12 @@ namespace {
 std::string shown(const toml::Node& node) {
     std::string text = node.key.empty() ? "" : node.key + "=";
     switch (node.kind) {
-    case toml::NodeKind::text:
-        return text + "'" + node.text + "'";
-    case toml::NodeKind::boolean:
-        return text + (node.boolean ? "true" : "false");
-    case toml::NodeKind::unread:
-        return text + "?";
+    case toml::NodeKind::text: return text + "'" + node.text + "'";
+    case toml::NodeKind::boolean: return text + (node.boolean ? "true" : "false");
+    case toml::NodeKind::unread: return text + "?";
     case toml::NodeKind::array:
-    case toml::NodeKind::table:
-        break;
-    default:
-        return text + node.text;
+    case toml::NodeKind::table: break;
+    default: return text + node.text;
     }
     const bool list = node.kind == toml::NodeKind::array;
     text += list ? "[" : "{";

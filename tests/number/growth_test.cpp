@@ -150,8 +150,7 @@ TEST_CASE("what growth encloses holds the value, and the order where it is known
                 INFO(f.words << " at " << L << " in " << low << " to " << high);
                 CHECK(f.value(L) >= x.low - 1e-12 * std::abs(x.low));
                 CHECK(f.value(L) <= x.high + 1e-12 * std::abs(x.high));
-                if (!x.known)
-                    continue;
+                if (!x.known) continue;
                 CHECK(order_at(f, L) >= x.order_low - 1e-6);
                 CHECK(order_at(f, L) <= x.order_high + 1e-6);
             }

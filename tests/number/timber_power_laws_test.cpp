@@ -17,7 +17,8 @@ namespace {
 Growth growth_of(const independent::Case& c, Limit limit) {
     const auto rules = independent::to_engine(c).rules();
     std::vector<Check<Growth>> checks(rules->plan(limit).parts.size());
-    rules->growth(limit, Growth::constant_between(300.0, 600.0), Growth::span_between(1000.0, 20000.0), checks.data());
+    rules->growth(Growth::constant_between(300.0, 600.0))
+        ->checks(limit, Growth::span_between(1000.0, 20000.0), checks.data());
     Growth widest = checks.front().demand / checks.front().resistance;
     for (const auto& check : checks) {
         const Growth u = check.demand / check.resistance;
@@ -32,8 +33,7 @@ independent::Case uniform_floor() {
     independent::Case c;
     c.loads.g = 0.0005;
     c.loads.q = 0.0015;
-    for (auto& limit : c.deflection)
-        limit = independent::DeflectionLimit{250.0, std::nullopt};
+    for (auto& limit : c.deflection) limit = independent::DeflectionLimit{250.0, std::nullopt};
     c.vibration = independent::Vibration::recommended;
     c.stock = 6000;
     return c;
@@ -100,8 +100,7 @@ int check_piece(const Joist& joist, Limit limit, const Piece& piece, TwoSpans sp
     int known = 0;
     for (std::size_t part = 0; part < piece.shapes.size(); ++part) {
         const CheckShape& shape = piece.shapes[part];
-        if (!shape.known || utilisation(at_a[part]) == 0.0)
-            continue;
+        if (!shape.known || utilisation(at_a[part]) == 0.0) continue;
         ++known;
         const double growth = utilisation(at_b[part]) / utilisation(at_a[part]);
         CHECK(growth >= std::pow(spans.b / spans.a, shape.order_low) * (1.0 - 1e-11));

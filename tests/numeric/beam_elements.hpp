@@ -21,8 +21,7 @@ inline double dot(const Vector& a, const Vector& b) {
 inline Vector product(const Matrix& A, const Vector& x) {
     Vector y;
     y.reserve(A.size());
-    for (const Vector& row : A)
-        y.push_back(dot(row, x));
+    for (const Vector& row : A) y.push_back(dot(row, x));
     return y;
 }
 
@@ -32,16 +31,13 @@ inline Vector solve(Matrix A, Vector b) {
     for (std::size_t k = 0; k < n; ++k) {
         for (std::size_t i = k + 1; i < n; ++i) {
             const double factor = A[i][k] / A[k][k];
-            if (factor == 0.0)
-                continue;
-            for (std::size_t j = k; j < n; ++j)
-                A[i][j] -= factor * A[k][j];
+            if (factor == 0.0) continue;
+            for (std::size_t j = k; j < n; ++j) A[i][j] -= factor * A[k][j];
             b[i] -= factor * b[k];
         }
     }
     for (std::size_t i = n; i-- > 0;) {
-        for (std::size_t j = i + 1; j < n; ++j)
-            b[i] -= A[i][j] * b[j];
+        for (std::size_t j = i + 1; j < n; ++j) b[i] -= A[i][j] * b[j];
         b[i] /= A[i][i];
     }
     return b;
@@ -54,8 +50,7 @@ inline double lowest_eigenvalue(const Matrix& K, const Matrix& M) {
     for (int i = 0; i < 60; ++i) {
         x = solve(K, product(M, x));
         const double scale = std::sqrt(dot(x, product(M, x)));
-        for (double& value : x)
-            value /= scale;
+        for (double& value : x) value /= scale;
         lambda = dot(x, product(K, x));
     }
     return lambda;
@@ -91,8 +86,7 @@ inline Assembled assemble_simply_supported(const Beam& beam, std::size_t n) {
     for (std::size_t e = 0; e < n; ++e) {
         for (std::size_t i = 0; i < 4; ++i) {
             for (std::size_t j = 0; j < 4; ++j) {
-                if (!kept(2 * e + i) || !kept(2 * e + j))
-                    continue;
+                if (!kept(2 * e + i) || !kept(2 * e + j)) continue;
                 a.K[place(2 * e + i)][place(2 * e + j)] += K_e[i][j];
                 a.M[place(2 * e + i)][place(2 * e + j)] += M_e[i][j];
             }

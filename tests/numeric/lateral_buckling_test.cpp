@@ -24,8 +24,7 @@ double lowest_twist_eigenvalue(double L) {
     for (std::size_t i = 0; i < inner; ++i) {
         K[i][i] = 2.0 / l;
         M[i][i] = 4.0 * l / 6.0;
-        if (i + 1 == inner)
-            continue;
+        if (i + 1 == inner) continue;
         K[i][i + 1] = K[i + 1][i] = -1.0 / l;
         M[i][i + 1] = M[i + 1][i] = l / 6.0;
     }
@@ -35,8 +34,7 @@ double lowest_twist_eigenvalue(double L) {
 /// Itor of a rectangle by St Venant's series.
 double torsion_by_series(double b, double h) {
     double sum = 0.0;
-    for (int n = 1; n < 200; n += 2)
-        sum += std::tanh(n * pi * h / (2.0 * b)) / std::pow(n, 5);
+    for (int n = 1; n < 200; n += 2) sum += std::tanh(n * pi * h / (2.0 * b)) / std::pow(n, 5);
     return h * b * b * b / 3.0 * (1.0 - 192.0 / std::pow(pi, 5) * b / h * sum);
 }
 

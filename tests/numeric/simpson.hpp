@@ -13,8 +13,7 @@ struct Interval {
 inline double simpson(const std::function<double(double)>& f, Interval over, int pairs = 400) {
     const double h = (over.b - over.a) / (2.0 * pairs);
     double sum = f(over.a) + f(over.b);
-    for (int i = 1; i < 2 * pairs; ++i)
-        sum += f(over.a + i * h) * (i % 2 == 1 ? 4.0 : 2.0);
+    for (int i = 1; i < 2 * pairs; ++i) sum += f(over.a + i * h) * (i % 2 == 1 ? 4.0 : 2.0);
     return sum * h / 3.0;
 }
 

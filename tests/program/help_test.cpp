@@ -70,7 +70,7 @@ TEST_CASE("examples of the help run as printed in the folder that start filled",
     }
 }
 
-TEST_CASE("--help anywhere shows help", "[program]") {
+TEST_CASE("the option --help anywhere shows help", "[program]") {
     const std::string of_tables = run_inside({"tables", "--help"}).out;
     const std::vector<Arguments> places{{"--help", "tables"},           {"tables", "none.toml", "--help"},
                                         {"tables", "--out", "x", "-h"}, {"tables", "a", "b", "c", "--help"},
@@ -116,7 +116,7 @@ TEST_CASE("every option of the table is understood", "[program]") {
     }
 }
 
-TEST_CASE("--version prints the version and the fingerprint of the catalogue", "[program]") {
+TEST_CASE("the option --version prints the version and the fingerprint of the catalogue", "[program]") {
     for (const Arguments& arguments : {Arguments{"--version"}, {"tables", "--version"}}) {
         const Outcome outcome = run_inside(arguments);
         CHECK(outcome.status == 0);

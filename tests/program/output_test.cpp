@@ -23,7 +23,7 @@ TEST_CASE("the judge of JSON refuses what is none", "[program]") {
     CHECK_FALSE(parses_as_json(""));
 }
 
-TEST_CASE("--json always parses", "[program]") {
+TEST_CASE("what --json prints always parses", "[program]") {
     const StartedFolder folder;
     for (const char* span : {"1 m", "4.2 m", "6 m", "15 m"}) {
         INFO(span);
@@ -78,7 +78,7 @@ TEST_CASE("no escape codes and no progress where nothing is a terminal", "[progr
     }
 }
 
-TEST_CASE("-q says nothing, and results stay the same", "[program]") {
+TEST_CASE("with -q nothing is said, and results stay the same", "[program]") {
     const StartedFolder folder;
     const Outcome spoken = run_inside(folder.tables());
     const Outcome silent = run_inside(with(folder.replacing_tables(), "-q"));
@@ -89,13 +89,13 @@ TEST_CASE("-q says nothing, and results stay the same", "[program]") {
     CHECK(run_inside({"start", folder.path() + "/another", "--quiet"}).err.empty());
 }
 
-TEST_CASE("-q keeps errors", "[program]") {
+TEST_CASE("with -q errors are said", "[program]") {
     const Outcome outcome = run_inside({"tables", "none.toml", "-q"});
     CHECK(outcome.status == 2);
     CHECK_THAT(outcome.err, Contains("none.toml"));
 }
 
-TEST_CASE("-v says where values come from, on standard error alone", "[program]") {
+TEST_CASE("with -v it is said where values come from, on standard error alone", "[program]") {
     const StartedFolder folder;
     const Outcome plain = run_inside(folder.check("4.2 m"));
     const Outcome wordy = run_inside(with(folder.check("4.2 m"), "-v"));

@@ -8,7 +8,9 @@
 namespace spanledger {
 namespace {
 
-std::string readme() { return file_text(SPANLEDGER_TEST_DATA "/../README.md"); }
+std::string readme() {
+    return file_text(SPANLEDGER_TEST_DATA "/../README.md");
+}
 
 /// The fenced text behind "<!-- output of: NAME -->".
 std::string shown_output(const std::string& name) {

@@ -95,7 +95,7 @@ TEST_CASE("a temporary folder that cannot be written is no hindrance", "[program
     }
 }
 
-TEST_CASE("- reads the brief from standard input", "[program]") {
+TEST_CASE("the operand - reads the brief from standard input", "[program]") {
     const StartedFolder folder;
     REQUIRE(run_inside(folder.tables()).status == 0);
     const auto issued = files_below(folder.out());

@@ -29,8 +29,7 @@ void check_never_worse(std::uint64_t seed, const Change& change, const Exception
         for (const LimitDefinition& definition : limit_definitions) {
             const auto& x = before[index_of(definition.limit)];
             const auto& y = after[index_of(definition.limit)];
-            if (!x || !y || exceptions.count(definition.limit) == 1)
-                continue;
+            if (!x || !y || exceptions.count(definition.limit) == 1) continue;
             ++compared;
             INFO(definition.name << " of " << independent::describe(c) << " at " << L);
             const double smaller = increases ? *x : *y;
@@ -62,8 +61,7 @@ TEST_CASE("bearing and lateral buckling never fall as the span grows but at thei
         INFO(independent::describe(c) << " at " << L);
         for (const Limit limit : {Limit::bearing, Limit::lateral_buckling}) {
             const auto& x = before[index_of(limit)];
-            if (x)
-                CHECK(*x <= *after[index_of(limit)] * (1.0 + (limit == Limit::bearing ? 1e-11 : 4e-4)));
+            if (x) CHECK(*x <= *after[index_of(limit)] * (1.0 + (limit == Limit::bearing ? 1e-11 : 4e-4)));
         }
     }
 }
@@ -81,17 +79,10 @@ TEST_CASE("utilisation never falls as a variable action grows") {
         [](auto& c, double&, auto& random) {
             const double factor = random.between(1.0, 3.0);
             switch (random.whole(0, 3)) {
-            case 0:
-                c.loads.q *= factor;
-                break;
-            case 1:
-                c.loads.partitions *= factor;
-                break;
-            case 2:
-                c.loads.snow *= factor;
-                break;
-            default:
-                c.loads.Q *= factor;
+            case 0: c.loads.q *= factor; break;
+            case 1: c.loads.partitions *= factor; break;
+            case 2: c.loads.snow *= factor; break;
+            default: c.loads.Q *= factor;
             }
         },
         {}, true);

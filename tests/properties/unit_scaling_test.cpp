@@ -20,21 +20,18 @@ struct Scale {
 };
 
 void scale_if(std::optional<double>& value, double factor) {
-    if (value)
-        *value *= factor;
+    if (value) *value *= factor;
 }
 
 independent::Timber scaled(independent::Timber m, const Scale& by) {
-    for (double* stress : {&m.fm, &m.fv, &m.fc90, &m.E, &m.E05, &m.G})
-        *stress *= by.stress();
+    for (double* stress : {&m.fm, &m.fv, &m.fc90, &m.E, &m.E05, &m.G}) *stress *= by.stress();
     scale_if(m.G05, by.stress());
     m.rho_mean *= by.stress() / by.length; // weight per volume
     return m;
 }
 
 independent::Loads scaled(independent::Loads l, const Scale& by) {
-    for (double* area : {&l.g, &l.g_partitions, &l.q, &l.partitions, &l.snow})
-        *area *= by.stress();
+    for (double* area : {&l.g, &l.g_partitions, &l.q, &l.partitions, &l.snow}) *area *= by.stress();
     l.Q *= by.force;
     return l;
 }
@@ -42,13 +39,10 @@ independent::Loads scaled(independent::Loads l, const Scale& by) {
 independent::Case scaled(independent::Case c, const Scale& by) {
     c.timber = scaled(c.timber, by);
     c.loads = scaled(c.loads, by);
-    for (double* length : {&c.b, &c.h, &c.spacing, &c.bearing, &c.floor_width, &c.a})
-        *length *= by.length;
-    for (auto* length : {&c.stock, &c.restraint, &c.camber})
-        scale_if(*length, by.length);
+    for (double* length : {&c.b, &c.h, &c.spacing, &c.bearing, &c.floor_width, &c.a}) *length *= by.length;
+    for (auto* length : {&c.stock, &c.restraint, &c.camber}) scale_if(*length, by.length);
     for (auto& limit : c.deflection) {
-        if (limit)
-            scale_if(limit->length, by.length);
+        if (limit) scale_if(limit->length, by.length);
     }
     c.deck_stiffness *= by.stress() * by.length * by.length * by.length;
     return c;
@@ -78,8 +72,7 @@ TEST_CASE("scaling forces, lengths and stresses together changes no utilisation"
         const auto after = independent::engine_utilisations(scaled(c, by), L * by.length);
         for (const LimitDefinition& definition : limit_definitions) {
             const auto& x = before[index_of(definition.limit)];
-            if (!x || exceptions.count(definition.limit) == 1)
-                continue;
+            if (!x || exceptions.count(definition.limit) == 1) continue;
             ++compared;
             INFO(definition.name << " of " << independent::describe(c) << " by " << by.length << ", " << by.force);
             CHECK(*after[index_of(definition.limit)] == Approx(*x).epsilon(1e-11));
@@ -93,8 +86,7 @@ TEST_CASE("bending and lateral buckling scale too where the size factor does not
     for (int i = 0; i < 2500; ++i) {
         independent::Case c = without_load_sharing(random);
         c.h = random.between(600, 900);
-        if (c.timber.kind == independent::Kind::lvl)
-            c.timber.s = 0.0;
+        if (c.timber.kind == independent::Kind::lvl) c.timber.s = 0.0;
         const double L = independent::lower_bound(c) + random.between(0, 6000);
         const Scale by{random.between(1.0, 3.0), random.between(0.2, 20.0)};
         const auto before = independent::engine_utilisations(c, L);
@@ -102,8 +94,7 @@ TEST_CASE("bending and lateral buckling scale too where the size factor does not
         INFO(independent::describe(c) << " by " << by.length << ", " << by.force);
         for (const Limit limit : {Limit::bending, Limit::lateral_buckling}) {
             const auto& x = before[index_of(limit)];
-            if (x)
-                CHECK(*after[index_of(limit)] == Approx(*x).epsilon(1e-11));
+            if (x) CHECK(*after[index_of(limit)] == Approx(*x).epsilon(1e-11));
         }
     }
 }

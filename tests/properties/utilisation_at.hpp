@@ -13,8 +13,7 @@ inline std::array<std::optional<double>, spanledger::limit_count> engine_utilisa
     const auto joist = rules->at({.spacing = c.spacing, .variable = c.loads.q});
     std::array<std::optional<double>, spanledger::limit_count> all;
     for (const auto& definition : spanledger::limit_definitions) {
-        if (rules->plan(definition.limit).status != spanledger::LimitStatus::checked)
-            continue;
+        if (rules->plan(definition.limit).status != spanledger::LimitStatus::checked) continue;
         all[spanledger::index_of(definition.limit)] =
             spanledger::worst_check(*rules, *joist, definition.limit, L).utilisation;
     }

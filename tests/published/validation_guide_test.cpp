@@ -14,12 +14,9 @@ namespace {
 
 std::string_view words(Mark mark) {
     switch (mark) {
-    case Mark::seen:
-        return "seen";
-    case Mark::from_memory:
-        return "from memory";
-    case Mark::common_practice:
-        return "common practice, no source";
+    case Mark::seen: return "seen";
+    case Mark::from_memory: return "from memory";
+    case Mark::common_practice: return "common practice, no source";
     }
     return {};
 }
@@ -37,16 +34,14 @@ Digits digits_of(std::string_view printed) {
     }
     const auto mantissa = printed.substr(0, e);
     const auto point = mantissa.find('.');
-    if (point != std::string_view::npos)
-        digits.decimals = static_cast<int>(mantissa.size() - point - 1);
+    if (point != std::string_view::npos) digits.decimals = static_cast<int>(mantissa.size() - point - 1);
     return digits;
 }
 
 /// Ours with two digits more than the source prints.
 std::string shown(const Row& row, double value) {
     const Digits digits = digits_of(row.printed);
-    if (row.printed.find('e') != std::string::npos)
-        return fmt::format("{:.{}e}", value, digits.decimals + 2);
+    if (row.printed.find('e') != std::string::npos) return fmt::format("{:.{}e}", value, digits.decimals + 2);
     return fmt::format("{:.{}f}", value, digits.decimals + 2);
 }
 
@@ -67,8 +62,7 @@ std::string section_of(const Example& example) {
         fmt::format("\n## {}\n\nSource: {}.\n\nInputs: {}.\n\n", example.title, example.source, example.inputs);
     text += "| quantity | printed | ours | unit | difference | printed value | remark |\n"
             "|---|---:|---:|---|---:|---|---|\n";
-    for (const Row& row : example.rows)
-        text += line_of(row);
+    for (const Row& row : example.rows) text += line_of(row);
     return text;
 }
 
@@ -86,8 +80,7 @@ std::string not_covered_section(const std::vector<Example>& examples) {
 std::string summary(const std::vector<Example>& examples) {
     std::array<std::size_t, 3> count{};
     for (const Example& example : examples) {
-        for (const Row& row : example.rows)
-            ++count[static_cast<std::size_t>(row.mark)];
+        for (const Row& row : example.rows) ++count[static_cast<std::size_t>(row.mark)];
     }
     return fmt::format("{} values: {} seen in their source, {} from memory, {} common practice without a source. Each "
                        "agrees with ours within half a unit of the last printed digit, unless its remark says why "
@@ -127,21 +120,23 @@ std::string guide(const std::vector<Example>& examples) {
     std::string text = "# Validation guide\n\nPublished results, ours, and the difference. Made by the test suite: "
                        "every row below is checked there.\n\n";
     text += summary(examples);
-    for (const Example& example : examples)
-        text += section_of(example);
+    for (const Example& example : examples) text += section_of(example);
     return text + not_covered_section(examples);
 }
 
 namespace {
 
 std::vector<Example> all_examples() {
-    std::vector<Example> all{beam_theory(),      combination_factors(),       lvl_floor(), din_floor(), glulam_hall(),
-                             steel_floor_beam(), lateral_buckling_of_a_beam(),
+    std::vector<Example> all{beam_theory(),
+                             combination_factors(),
+                             lvl_floor(),
+                             din_floor(),
+                             glulam_hall(),
+                             steel_floor_beam(),
+                             lateral_buckling_of_a_beam(),
                              lipped_channel_section()};
-    for (auto& table : timber_parameters())
-        all.push_back(std::move(table));
-    for (auto& table : psi_factors())
-        all.push_back(std::move(table));
+    for (auto& table : timber_parameters()) all.push_back(std::move(table));
+    for (auto& table : psi_factors()) all.push_back(std::move(table));
     return all;
 }
 

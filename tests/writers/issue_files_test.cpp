@@ -164,3 +164,18 @@ TEST_CASE("An issue without tables, and tables without rows or columns, are writ
     issue.brief.practice = {};
     CHECK(write_issue(issue, folder.path(), false).kind == Kind::written);
 }
+
+TEST_CASE("Words far too long for a page are written all the same", "[writers][issue]") {
+    const WorkingFolder folder;
+    Issue issue = sample::issue();
+    Practice& practice = issue.brief.practice;
+    practice.name = std::string(300, '&');
+    practice.title.clear();
+    for (int i = 0; i < 200; ++i) practice.title += "üÜ ";
+    practice.notes = std::string(10000, 'n');
+    practice.revision = std::string(60, '&');
+    issue.basis.front().value = std::string(20000, 'v');
+    issue.tables.front().head_notes = {std::string(5000, 'h')};
+    issue.tables.front().columns.front().load = std::string(500, 'l');
+    CHECK(write_issue(issue, folder.path(), false).kind == Kind::written);
+}

@@ -143,7 +143,7 @@ inline TableResult other_table(TableKind kind, double unit) {
             cell.governing = Limit::shear;
             if (row == 0 && column == 2) {
                 cell = {};
-                cell.reason = "no load: a limit fails without variable action";
+                cell.reason = "a limit fails without variable action";
             }
             table.cells.push_back(cell);
         }

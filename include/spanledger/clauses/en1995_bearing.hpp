@@ -24,8 +24,8 @@ template <class N> struct DiscreteSupport {
     N h; ///< depth, mm
 };
 
-/// 6.1.5(4): kc,90 on discrete supports counts only where the clear distance L - t is at least 2h. Written in L, so that
-/// a span of just 2h is not lost in the last digit.
+/// 6.1.5(4): kc,90 on discrete supports counts only where the clear distance L - t is at least 2h. Written in L, so
+/// that a span of just 2h is not lost in the last digit.
 template <class N> N bearing_factor(const DiscreteSupport<N>& x, const N& L) {
     return named("k_c_90", "-", "EN 1995-1-1 6.1.5(4)", select(L >= 2.0 * x.h + x.t, x.k_c_90, N(1.0)));
 }

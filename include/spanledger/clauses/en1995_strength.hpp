@@ -21,9 +21,9 @@ template <class N> struct SizeFactor {
 
 /// (3.1) and (3.2): kh = min((h0/h)^e, cap) for h < h0, else 1
 template <class N> N size_factor_below_reference_depth(const SizeFactor<N>& rule, const N& h) {
-    return named("k_h", "-", "EN 1995-1-1 (3.1), (3.2)",
-                 select(h < rule.reference_depth, least(power(rule.reference_depth / h, rule.exponent), rule.cap),
-                        N(1.0)));
+    return named(
+        "k_h", "-", "EN 1995-1-1 (3.1), (3.2)",
+        select(h < rule.reference_depth, least(power(rule.reference_depth / h, rule.exponent), rule.cap), N(1.0)));
 }
 
 /// (3.3): kh = min((300/h)^s, 1.2) for LVL edgewise; below 1 for deeper members

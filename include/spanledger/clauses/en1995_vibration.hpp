@@ -28,8 +28,7 @@ template <class N> struct UnitLoad {
 
 /// w(1 kN) = kdist kamp 1000 L3/(48 EI), mm
 template <class N> N unit_load_deflection(const UnitLoad<N>& x, const N& L) {
-    return named("w_1kN", "mm", "EN 1995-1-1 (7.3); UK NA.2.6",
-                 x.k_dist * x.k_amp * 1000.0 * cubed(L) / (48.0 * x.EI));
+    return named("w_1kN", "mm", "EN 1995-1-1 (7.3); UK NA.2.6", x.k_dist * x.k_amp * 1000.0 * cubed(L) / (48.0 * x.EI));
 }
 
 /// (7.7): n40, the number of modes below 40 Hz; 0 where f1 is 40 Hz or more
@@ -69,22 +68,22 @@ template <class N> N distribution_factor(const LoadSharing<N>& x) {
 }
 
 template <class N> struct UnitLoadLimit {
-    N short_limit;    ///< 1.8 mm
-    N short_span;     ///< 4000 mm
-    N long_factor;    ///< 16500
-    N long_exponent;  ///< 1.1
+    N short_limit;   ///< 1.8 mm
+    N short_span;    ///< 4000 mm
+    N long_factor;   ///< 16500
+    N long_exponent; ///< 1.1
 };
 
 /// Table NA.5: a = 1.8 mm up to 4 m, 16500/L^1.1 above (L in mm)
 template <class N> N unit_load_limit(const UnitLoadLimit<N>& x, const N& L) {
     return named("a", "mm", "UK NA to EN 1995-1-1 Table NA.5",
-                 select(L <= x.short_span, x.short_limit, x.long_factor / power(L, x.long_exponent)));
+                 select(L <= x.short_span, x.short_limit, [&] { return x.long_factor / power(L, x.long_exponent); }));
 }
 
 /// Table NA.5 and figure 7.2: b = 180 - 60a up to a = 1, 160 - 40a above, kept within 50 and 150
 template <class N> N velocity_base(const N& a) {
-    const N b = named("b_0", "-", "UK NA to EN 1995-1-1 Table NA.5",
-                      select(a <= N(1.0), 180.0 - 60.0 * a, 160.0 - 40.0 * a));
+    const N b =
+        named("b_0", "-", "UK NA to EN 1995-1-1 Table NA.5", select(a <= N(1.0), 180.0 - 60.0 * a, 160.0 - 40.0 * a));
     return named("b", "-", "UK NA to EN 1995-1-1 Table NA.5", least(greatest(b, N(50.0)), N(150.0)));
 }
 

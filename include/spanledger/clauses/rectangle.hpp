@@ -8,7 +8,9 @@
 namespace spanledger::rectangle {
 
 /// A = bh, mm2
-template <class N> N area(const N& b, const N& h) { return named("A", "mm2", "geometry", b * h); }
+template <class N> N area(const N& b, const N& h) {
+    return named("A", "mm2", "geometry", b * h);
+}
 
 /// W = bh2/6, mm3
 template <class N> N section_modulus(const N& b, const N& h) {

@@ -23,7 +23,9 @@ template <class N> struct Check {
     N resistance;
 };
 
-[[nodiscard]] inline double utilisation(const Check<double>& check) noexcept { return check.demand / check.resistance; }
+[[nodiscard]] inline double utilisation(const Check<double>& check) noexcept {
+    return check.demand / check.resistance;
+}
 
 /// How a limit is checked for a member under a load class, whatever the spacing and span.
 struct LimitPlan {
@@ -32,9 +34,9 @@ struct LimitPlan {
     std::string clause;
     std::string unit;
     std::vector<std::string> parts; ///< one per check, e.g. "6.10, uniform"
-    bool strict = false; ///< fails at a utilisation of exactly 1 too
-    bool capped = true;  ///< the practice's utilisation cap applies; otherwise 1
-    std::string when_failing; ///< what the standard says of a member that fails, if anything
+    bool strict = false;            ///< fails at a utilisation of exactly 1 too
+    bool capped = true;             ///< the practice's utilisation cap applies; otherwise 1
+    std::string when_failing;       ///< what the standard says of a member that fails, if anything
 };
 
 using LimitPlans = std::array<LimitPlan, limit_count>;
@@ -73,7 +75,20 @@ public:
     /// All checks of one limit at effective span L (mm), in the order of the plan's parts; `out` has room for them.
     virtual void checks(Limit limit, double L, Check<double>* out) const = 0;
 
-    [[nodiscard]] virtual JoistFacts facts(double L) const = 0;
+    /// `cap`: the utilisation that the bearing length needed may leave.
+    [[nodiscard]] virtual JoistFacts facts(double L, double cap) const = 0;
+};
+
+/// How the checks of a member grow with the span, for every spacing of a range.
+class JoistGrowth {
+public:
+    JoistGrowth() = default;
+    JoistGrowth(const JoistGrowth&) = delete;
+    JoistGrowth& operator=(const JoistGrowth&) = delete;
+    virtual ~JoistGrowth() = default;
+
+    /// All checks of one limit over the spans `L`, in the order of the plan's parts; `out` has room for them.
+    virtual void checks(Limit limit, const Growth& L, Check<Growth>* out) const = 0;
 };
 
 /// A member under a load class in a basis.
@@ -89,8 +104,8 @@ public:
 
     [[nodiscard]] virtual std::unique_ptr<Joist> at(const Variation& variation) const = 0;
 
-    /// How the checks of a limit grow with the span, for every spacing within `spacing`.
-    virtual void growth(Limit limit, const Growth& spacing, const Growth& L, Check<Growth>* out) const = 0;
+    /// For every spacing within `spacing`. These rules must outlive what is returned.
+    [[nodiscard]] virtual std::unique_ptr<JoistGrowth> growth(const Growth& spacing) const = 0;
 
     /// All checks of one limit at a clear span (mm), each value with the way it came about.
     [[nodiscard]] virtual std::vector<Check<Traced>> trace(Limit limit, const Variation& variation,

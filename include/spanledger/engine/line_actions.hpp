@@ -41,8 +41,7 @@ template <class N> class LineActions {
 public:
     LineActions() = default;
     LineActions(const ActionInputs<N>& inputs, const N& self_weight) : in_(inputs), self_weight_(self_weight) {
-        permanent_ = named("g", "N/mm", "EN 1990 6.4.3",
-                           (in_.g_k + in_.g_partitions) * in_.spacing + self_weight);
+        permanent_ = named("g", "N/mm", "EN 1990 6.4.3", (in_.g_k + in_.g_partitions) * in_.spacing + self_weight);
     }
 
     /// Permanent line load, self-weight and permanent partitions included.
@@ -57,8 +56,7 @@ public:
         switch (action) {
         case Action::uniform: return {named("q", "N/mm", "EN 1991-1-1 6.3", in_.q_k * in_.spacing), N(0.0)};
         case Action::snow: return {named("q_s", "N/mm", "EN 1991-1-3", in_.s_k * in_.spacing), N(0.0)};
-        case Action::concentrated:
-            return {N(0.0), named("F", "N", "EN 1991-1-1 6.3.1.2", in_.Q_share * in_.Q_k)};
+        case Action::concentrated: return {N(0.0), named("F", "N", "EN 1991-1-1 6.3.1.2", in_.Q_share * in_.Q_k)};
         case Action::none: break;
         }
         return {N(0.0), N(0.0)};

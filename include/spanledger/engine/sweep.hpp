@@ -17,8 +17,8 @@ struct SpanRange {
 
 /// How one check grows within one piece of the range.
 struct CheckShape {
-    bool known = false;      ///< the orders hold
-    double order_low = 0.0;  ///< of the utilisation
+    bool known = false;     ///< the orders hold
+    double order_low = 0.0; ///< of the utilisation
     double order_high = 0.0;
 };
 
@@ -41,7 +41,7 @@ public:
     [[nodiscard]] const SpanRange& range() const noexcept { return range_; }
 
 private:
-    [[nodiscard]] std::vector<Piece> pieces_of(const JoistRules& rules, Limit limit, SpanRange spacings) const;
+    [[nodiscard]] std::vector<Piece> pieces_of(const JoistGrowth& growth, Limit limit) const;
     [[nodiscard]] LimitOutcome solve_limit(const Joist& joist, Limit limit) const;
 
     const JoistRules* rules_;
@@ -59,7 +59,9 @@ struct WorstCheck {
 [[nodiscard]] WorstCheck worst_check(const JoistRules& rules, const Joist& joist, Limit limit, double L);
 
 /// The utilisation a limit may reach.
-[[nodiscard]] inline double cap_of(const LimitPlan& plan, double cap) noexcept { return plan.capped ? cap : 1.0; }
+[[nodiscard]] inline double cap_of(const LimitPlan& plan, double cap) noexcept {
+    return plan.capped ? cap : 1.0;
+}
 
 /// Whether a utilisation passes: at most the cap within rounding of the last digits, below 1 where the limit is strict.
 [[nodiscard]] bool passes(const LimitPlan& plan, double utilisation, double cap) noexcept;

@@ -30,32 +30,18 @@ public:
     /// Calls out(demand, resistance) for each check of the limit, in the order of the plan's parts.
     template <class Out> void checks(Limit limit, const N& L, Out&& out) const {
         switch (limit) {
-        case Limit::bending:
-            return bending(L, out);
-        case Limit::shear:
-            return shear(L, out);
-        case Limit::bearing:
-            return bearing(L, out);
-        case Limit::lateral_buckling:
-            return lateral_buckling(L, out);
-        case Limit::variable_deflection:
-            return variable_deflection(L, out);
-        case Limit::instantaneous_deflection:
-            return instantaneous_deflection(L, out);
-        case Limit::final_deflection:
-            return final_deflection(L, out);
-        case Limit::frequency:
-            out(in_.min_frequency, first_frequency(L));
-            return;
-        case Limit::unit_load_deflection:
-            return unit_load_deflection(L, out);
-        case Limit::velocity_response:
-            return velocity_response(L, out);
-        case Limit::stock_length:
-            out(named("l", "mm", "common practice", L + in_.t), in_.stock_length);
-            return;
-        case Limit::bending_with_shear:
-            return;
+        case Limit::bending: return bending(L, out);
+        case Limit::shear: return shear(L, out);
+        case Limit::bearing: return bearing(L, out);
+        case Limit::lateral_buckling: return lateral_buckling(L, out);
+        case Limit::variable_deflection: return variable_deflection(L, out);
+        case Limit::instantaneous_deflection: return instantaneous_deflection(L, out);
+        case Limit::final_deflection: return final_deflection(L, out);
+        case Limit::frequency: out(in_.min_frequency, first_frequency(L)); return;
+        case Limit::unit_load_deflection: return unit_load_deflection(L, out);
+        case Limit::velocity_response: return velocity_response(L, out);
+        case Limit::stock_length: out(named("l", "mm", "common practice", L + in_.t), in_.stock_length); return;
+        case Limit::bending_with_shear: return;
         }
     }
 
@@ -167,12 +153,9 @@ private:
     [[nodiscard]] N size_factor() const {
         const en1995::SizeFactor<N> rule{in_.kh_depth, in_.kh_exponent, in_.kh_cap};
         switch (kinds_->size_rule) {
-        case SizeRule::below_reference_depth:
-            return en1995::size_factor_below_reference_depth(rule, in_.h);
-        case SizeRule::lvl:
-            return en1995::size_factor_lvl(rule, in_.h);
-        case SizeRule::none:
-            break;
+        case SizeRule::below_reference_depth: return en1995::size_factor_below_reference_depth(rule, in_.h);
+        case SizeRule::lvl: return en1995::size_factor_lvl(rule, in_.h);
+        case SizeRule::none: break;
         }
         return N(1.0);
     }
@@ -204,8 +187,7 @@ private:
     }
 
     [[nodiscard]] N shear_force(const beam::Load<N>& load, const N& L) const {
-        if (kinds_->cantilever)
-            return beam::cantilever::shear(load, L);
+        if (kinds_->cantilever) return beam::cantilever::shear(load, L);
         if (!kinds_->uniform_near_support && !kinds_->concentrated_near_support) {
             return beam::simply_supported::shear(load, L);
         }
@@ -222,12 +204,9 @@ private:
     [[nodiscard]] N bearing_factor(const N& L) const {
         const en1995::DiscreteSupport<N> support{in_.k_c_90, in_.t, in_.h};
         switch (kinds_->bearing_rule) {
-        case BearingRule::discrete:
-            return en1995::bearing_factor(support, L);
-        case BearingRule::glulam:
-            return en1995::bearing_factor_glulam(support, in_.k_c_90_max_t, L);
-        case BearingRule::none:
-            break;
+        case BearingRule::discrete: return en1995::bearing_factor(support, L);
+        case BearingRule::glulam: return en1995::bearing_factor_glulam(support, in_.k_c_90_max_t, L);
+        case BearingRule::none: break;
         }
         return N(1.0);
     }
@@ -267,20 +246,16 @@ private:
             return en1995::effective_length<N>({L, end_force ? N(0.8) : N(0.5), allowance});
         }
         const N unrestrained = en1995::effective_length<N>({L, N(0.9), allowance});
-        if (!kinds_->restrained_at_intervals)
-            return unrestrained;
+        if (!kinds_->restrained_at_intervals) return unrestrained;
         const N between = en1995::effective_length<N>({in_.restraint_spacing, N(1.0), allowance});
         return named("l_ef", "mm", "EN 1995-1-1 Table 6.1", select(in_.restraint_spacing >= L, unrestrained, between));
     }
 
     [[nodiscard]] N height_allowance() const {
         switch (kinds_->load_position) {
-        case LoadPosition::top:
-            return 2.0 * in_.h;
-        case LoadPosition::bottom:
-            return -0.5 * in_.h;
-        case LoadPosition::centroid:
-            break;
+        case LoadPosition::top: return 2.0 * in_.h;
+        case LoadPosition::bottom: return -0.5 * in_.h;
+        case LoadPosition::centroid: break;
         }
         return N(0.0);
     }
@@ -292,10 +267,8 @@ private:
     };
 
     template <class Out> void deflection_checks(const N& w, const DeflectionCriteria& c, const N& L, Out& out) const {
-        if (kinds_->has_ratio[c.index])
-            out(w, named("w_lim", "mm", "EN 1995-1-1 7.2", L / c.ratio));
-        if (kinds_->has_length[c.index])
-            out(w, c.length);
+        if (kinds_->has_ratio[c.index]) out(w, named("w_lim", "mm", "EN 1995-1-1 7.2", L / c.ratio));
+        if (kinds_->has_length[c.index]) out(w, c.length);
     }
 
     template <class Out> void variable_deflection(const N& L, Out& out) const {
@@ -321,8 +294,7 @@ private:
     }
 
     [[nodiscard]] N unit_load_limit(const N& L) const {
-        if (kinds_->vibration == VibrationRuleSet::recommended)
-            return in_.a;
+        if (kinds_->vibration == VibrationRuleSet::recommended) return in_.a;
         return uk::unit_load_limit<N>({in_.a_short, in_.a_short_span, in_.a_long, in_.a_long_exponent}, L);
     }
 

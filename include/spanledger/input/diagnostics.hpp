@@ -14,7 +14,7 @@ struct Place {
     std::size_t line = 0;
     std::size_t column = 0;
     std::string source_line{}; ///< the whole line as read, without its line end
-    std::size_t width = 1;   ///< how many characters the caret underlines
+    std::size_t width = 1;     ///< how many characters the caret underlines
 };
 
 enum class Severity { error, warning };

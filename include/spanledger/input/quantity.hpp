@@ -9,15 +9,15 @@ namespace spanledger {
 
 /// What a quantity measures. Numbers inside are in N, mm, MPa, kg, s.
 enum class Dimension {
-    number,            ///< no unit
-    length,            ///< mm
-    area_load,         ///< N/mm2
-    line_load,         ///< N/mm
-    force,             ///< N
-    stress,            ///< MPa
-    density,           ///< kg/m3
-    frequency,         ///< Hz
-    plate_stiffness,   ///< N mm2 per metre
+    number,          ///< no unit
+    length,          ///< mm
+    area_load,       ///< N/mm2
+    line_load,       ///< N/mm
+    force,           ///< N
+    stress,          ///< MPa
+    density,         ///< kg/m3
+    frequency,       ///< Hz
+    plate_stiffness, ///< N mm2 per metre
 };
 
 [[nodiscard]] std::string_view dimension_name(Dimension dimension) noexcept;

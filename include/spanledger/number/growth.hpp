@@ -15,7 +15,7 @@
 namespace spanledger {
 
 struct Growth {
-    double low = 0.0;  ///< enclosure of the value
+    double low = 0.0; ///< enclosure of the value
     double high = 0.0;
     double order_low = 0.0; ///< enclosure of the order, where `known`
     double order_high = 0.0;
@@ -23,7 +23,8 @@ struct Growth {
     bool varies = false; ///< depends on L
 
     constexpr Growth() noexcept = default;
-    constexpr Growth(double x) noexcept : low(x), high(x) {} // NOLINT(google-explicit-constructor): a literal in a clause
+    constexpr Growth(double x) noexcept
+        : low(x), high(x) {} // NOLINT(google-explicit-constructor): a literal in a clause
 
     /// A quantity that does not change with L but is known only to lie in an interval (a spacing of several).
     static constexpr Growth constant_between(double low, double high) noexcept {
@@ -93,7 +94,9 @@ inline void take_order_of_difference(Growth& x, const Growth& a, const Growth& b
 
 } // namespace words
 
-inline Growth named(const char*, const char*, const char*, const Growth& x) noexcept { return x; }
+inline Growth named(const char*, const char*, const char*, const Growth& x) noexcept {
+    return x;
+}
 
 inline Growth operator+(const Growth& a, const Growth& b) noexcept {
     if (a.is_zero()) return b;
@@ -113,7 +116,9 @@ inline Growth operator-(const Growth& a, const Growth& b) noexcept {
     return x;
 }
 
-inline Growth operator-(const Growth& a) noexcept { return Growth(0.0) - a; }
+inline Growth operator-(const Growth& a) noexcept {
+    return Growth(0.0) - a;
+}
 
 inline Growth operator*(const Growth& a, const Growth& b) noexcept {
     if (a.is_zero() || b.is_zero()) return Growth(0.0);
@@ -143,8 +148,12 @@ inline GrowthCondition operator<=(const Growth& a, const Growth& b) noexcept {
 inline GrowthCondition operator<(const Growth& a, const Growth& b) noexcept {
     return {.always = a.high < b.low, .never = a.low >= b.high, .varies = a.varies || b.varies};
 }
-inline GrowthCondition operator>=(const Growth& a, const Growth& b) noexcept { return b <= a; }
-inline GrowthCondition operator>(const Growth& a, const Growth& b) noexcept { return b < a; }
+inline GrowthCondition operator>=(const Growth& a, const Growth& b) noexcept {
+    return b <= a;
+}
+inline GrowthCondition operator>(const Growth& a, const Growth& b) noexcept {
+    return b < a;
+}
 
 inline GrowthCondition both(const GrowthCondition& a, const GrowthCondition& b) noexcept {
     return {.always = a.always && b.always, .never = a.never || b.never, .varies = a.varies || b.varies};
@@ -203,12 +212,22 @@ inline Growth power(const Growth& x, const Growth& exponent) noexcept {
     return result;
 }
 
-inline Growth root(const Growth& x) noexcept { return power(x, 0.5); }
-inline Growth squared(const Growth& x) noexcept { return x * x; }
-inline Growth cubed(const Growth& x) noexcept { return x * x * x; }
-inline Growth fourth(const Growth& x) noexcept { return squared(squared(x)); }
+inline Growth root(const Growth& x) noexcept {
+    return power(x, 0.5);
+}
+inline Growth squared(const Growth& x) noexcept {
+    return x * x;
+}
+inline Growth cubed(const Growth& x) noexcept {
+    return x * x * x;
+}
+inline Growth fourth(const Growth& x) noexcept {
+    return squared(squared(x));
+}
 
-inline bool settled(const Growth& /*now*/, const Growth& /*before*/) noexcept { return false; }
+inline bool settled(const Growth& /*now*/, const Growth& /*before*/) noexcept {
+    return false;
+}
 
 inline Growth ln(const Growth& x) noexcept {
     Growth result = words::unknown_between(x.low > 0.0 ? std::log(x.low) : -words::infinity,

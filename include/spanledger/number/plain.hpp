@@ -19,10 +19,16 @@ constexpr double named(const char* /*symbol*/, const char* /*unit*/, const char*
 }
 
 /// Opens a heading for the quantities named in `body`.
-template <class Body> constexpr auto under(const char* /*heading*/, Body&& body) { return std::forward<Body>(body)(); }
+template <class Body> constexpr auto under(const char* /*heading*/, Body&& body) {
+    return std::forward<Body>(body)();
+}
 
-constexpr bool both(bool a, bool b) noexcept { return a && b; }
-constexpr bool either(bool a, bool b) noexcept { return a || b; }
+constexpr bool both(bool a, bool b) noexcept {
+    return a && b;
+}
+constexpr bool either(bool a, bool b) noexcept {
+    return a || b;
+}
 
 namespace words {
 /// A branch is a number, or a callable where working it out is costly.
@@ -41,17 +47,35 @@ template <class A, class B> constexpr double select(bool condition, A&& a, B&& b
                      : static_cast<double>(words::value_of(std::forward<B>(b)));
 }
 
-constexpr double least(double a, double b) noexcept { return std::min(a, b); }
-constexpr double greatest(double a, double b) noexcept { return std::max(a, b); }
-inline double root(double x) noexcept { return std::sqrt(x); }
-inline double power(double x, double exponent) noexcept { return std::pow(x, exponent); }
-constexpr double squared(double x) noexcept { return x * x; }
-constexpr double cubed(double x) noexcept { return x * x * x; }
-constexpr double fourth(double x) noexcept { return squared(squared(x)); }
-inline double ln(double x) noexcept { return std::log(x); }
+constexpr double least(double a, double b) noexcept {
+    return std::min(a, b);
+}
+constexpr double greatest(double a, double b) noexcept {
+    return std::max(a, b);
+}
+inline double root(double x) noexcept {
+    return std::sqrt(x);
+}
+inline double power(double x, double exponent) noexcept {
+    return std::pow(x, exponent);
+}
+constexpr double squared(double x) noexcept {
+    return x * x;
+}
+constexpr double cubed(double x) noexcept {
+    return x * x * x;
+}
+constexpr double fourth(double x) noexcept {
+    return squared(squared(x));
+}
+inline double ln(double x) noexcept {
+    return std::log(x);
+}
 
 /// Whether a step of an iteration no longer changes its result. It may end only the run in double: other number types
 /// take every step.
-inline bool settled(double now, double before) noexcept { return std::abs(now - before) <= 1e-12 * std::abs(now); }
+inline bool settled(double now, double before) noexcept {
+    return std::abs(now - before) <= 1e-12 * std::abs(now);
+}
 
 } // namespace spanledger

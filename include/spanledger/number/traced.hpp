@@ -123,7 +123,9 @@ inline Traced operator*(const Traced& a, const Traced& b) {
     if (words::is_constant(b, 1.0)) return a;
     return words::traced(Operation::multiply, a.value() * b.value(), a, b);
 }
-inline Traced operator-(const Traced& a) { return Traced(-1.0) * a; }
+inline Traced operator-(const Traced& a) {
+    return Traced(-1.0) * a;
+}
 inline Traced operator/(const Traced& a, const Traced& b) {
     if (words::is_constant(a, 0.0)) return a;
     if (words::is_constant(b, 1.0)) return a;
@@ -136,8 +138,12 @@ inline TracedCondition operator<(const Traced& a, const Traced& b) {
 inline TracedCondition operator<=(const Traced& a, const Traced& b) {
     return words::compared(Operation::less_or_equal, a.value() <= b.value(), a.trace(), b.trace());
 }
-inline TracedCondition operator>(const Traced& a, const Traced& b) { return b < a; }
-inline TracedCondition operator>=(const Traced& a, const Traced& b) { return b <= a; }
+inline TracedCondition operator>(const Traced& a, const Traced& b) {
+    return b < a;
+}
+inline TracedCondition operator>=(const Traced& a, const Traced& b) {
+    return b <= a;
+}
 inline TracedCondition both(const TracedCondition& a, const TracedCondition& b) {
     return words::compared(Operation::both, a.holds() && b.holds(), a.trace(), b.trace());
 }
@@ -159,16 +165,28 @@ inline Traced least(const Traced& a, const Traced& b) {
 inline Traced greatest(const Traced& a, const Traced& b) {
     return words::traced(Operation::greatest, greatest(a.value(), b.value()), a, b);
 }
-inline Traced root(const Traced& x) { return Traced(Traced::make(Operation::root, root(x.value()), {x.trace()})); }
-inline Traced ln(const Traced& x) { return Traced(Traced::make(Operation::logarithm, ln(x.value()), {x.trace()})); }
+inline Traced root(const Traced& x) {
+    return Traced(Traced::make(Operation::root, root(x.value()), {x.trace()}));
+}
+inline Traced ln(const Traced& x) {
+    return Traced(Traced::make(Operation::logarithm, ln(x.value()), {x.trace()}));
+}
 inline Traced power(const Traced& x, const Traced& exponent) {
     return words::traced(Operation::power, power(x.value(), exponent.value()), x, exponent);
 }
-inline Traced squared(const Traced& x) { return words::traced(Operation::power, squared(x.value()), x, Traced(2.0)); }
-inline Traced cubed(const Traced& x) { return words::traced(Operation::power, cubed(x.value()), x, Traced(3.0)); }
-inline Traced fourth(const Traced& x) { return words::traced(Operation::power, fourth(x.value()), x, Traced(4.0)); }
+inline Traced squared(const Traced& x) {
+    return words::traced(Operation::power, squared(x.value()), x, Traced(2.0));
+}
+inline Traced cubed(const Traced& x) {
+    return words::traced(Operation::power, cubed(x.value()), x, Traced(3.0));
+}
+inline Traced fourth(const Traced& x) {
+    return words::traced(Operation::power, fourth(x.value()), x, Traced(4.0));
+}
 
 /// An iteration is shown to its last step.
-inline bool settled(const Traced& /*now*/, const Traced& /*before*/) noexcept { return false; }
+inline bool settled(const Traced& /*now*/, const Traced& /*before*/) noexcept {
+    return false;
+}
 
 } // namespace spanledger

@@ -28,7 +28,7 @@ struct LimitCheck {
 };
 
 struct DeflectionLine {
-    std::string name;  ///< "variable", "instantaneous", "final"
+    std::string name;   ///< "variable", "instantaneous", "final"
     std::string action; ///< governing variable action
     double mm = 0.0;
     double span_ratio = 0.0; ///< n of L/n
@@ -41,8 +41,8 @@ struct Reaction {
 };
 
 struct Neighbour {
-    std::string member;      ///< or the same member at another spacing
-    double spacing = 0.0;    ///< mm
+    std::string member;   ///< or the same member at another spacing
+    double spacing = 0.0; ///< mm
     bool passes = false;
     double utilisation = 0.0;
     std::optional<double> permissible; ///< clear span in mm
@@ -60,8 +60,8 @@ struct CheckResult {
     double utilisation = 0.0;       ///< the largest
     std::optional<Limit> worst;     ///< the limit of the largest utilisation
     double cap = 1.0;
-    std::optional<double> permissible; ///< clear span in mm, unrounded
-    std::optional<double> printed;     ///< rounded as a table would
+    std::optional<double> permissible;      ///< clear span in mm, unrounded
+    std::optional<double> printed;          ///< rounded as a table would
     std::optional<double> permissible_load; ///< N/mm2
     std::string no_span_reason;
     std::vector<LimitCheck> limits; ///< every limit in order

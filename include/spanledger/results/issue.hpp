@@ -33,11 +33,11 @@ struct Cell {
     /// Printed, rounded to the safe side; empty where there is none. By the table's kind: clear span in mm, variable
     /// action in N/mm2, utilisation, or (smallest section) the utilisation of the section named in `text`.
     std::optional<double> value;
-    std::string text;         ///< smallest section only: its name
-    double utilisation = 0.0; ///< the largest at the printed value
-    std::optional<Limit> governing; ///< smallest permissible span; empty: none reached, or no span
-    std::optional<Limit> next;      ///< the next smallest
-    std::string reason;             ///< why there is no span, or "no limit reached"
+    std::string text;                  ///< smallest section only: its name
+    double utilisation = 0.0;          ///< the largest at the printed value
+    std::optional<Limit> governing;    ///< smallest permissible span; empty: none reached, or no span
+    std::optional<Limit> next;         ///< the next smallest
+    std::string reason;                ///< why there is no span, or "no limit reached"
     std::optional<double> permissible; ///< unrounded, in the unit of `value`
     std::array<LimitOutcome, limit_count> limits{};
 };
@@ -46,13 +46,13 @@ struct Cell {
 struct RowHead {
     std::string material_class;
     std::string section;
-    double depth = 0.0; ///< mm
+    double depth = 0.0;              ///< mm
     std::optional<double> span = {}; ///< mm, clear
 };
 
 struct ColumnHead {
     std::string load;
-    double spacing = 0.0; ///< mm
+    double spacing = 0.0;            ///< mm
     std::optional<double> span = {}; ///< mm, clear: tables of permissible loads and of utilisations
 };
 
@@ -71,9 +71,9 @@ struct TableResult {
     std::string members;  ///< name of the members entry
     std::string material; ///< "solid timber", ...
     std::vector<RowHead> rows;
-    std::vector<ColumnHead> columns; ///< load class by load class, each with its spacings
-    std::vector<Cell> cells;         ///< row by row
-    std::vector<LimitNote> limits;   ///< every limit, in order
+    std::vector<ColumnHead> columns;     ///< load class by load class, each with its spacings
+    std::vector<Cell> cells;             ///< row by row
+    std::vector<LimitNote> limits;       ///< every limit, in order
     std::vector<std::string> head_notes; ///< what is not checked, and rules of the whole table
 
     [[nodiscard]] const Cell& at(std::size_t row, std::size_t column) const {

@@ -13,7 +13,8 @@ namespace spanledger {
 [[nodiscard]] std::string csv_field(std::string_view text);
 
 /// The issue as long-form CSV (RFC 4180), a line per cell, then a column per limit with its own permissible clear span,
-/// rounded down to 1 mm: empty where the limit is never reached or not checked, 0.000 where it fails at once.
+/// rounded down to 1 mm: empty where the limit is never reached or not checked, 0.000 where it fails at once. All
+/// numbers of the issue must be finite (issue_record tells).
 [[nodiscard]] std::string issue_csv(const Issue& issue);
 
 } // namespace spanledger

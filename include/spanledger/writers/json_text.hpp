@@ -40,8 +40,7 @@ public:
     }
     template <class T> void value(const std::vector<T>& list) {
         open_list();
-        for (const T& element : list)
-            value(element);
+        for (const T& element : list) value(element);
         close_list();
     }
     template <class T> void field(std::string_view name, const T& content) {

@@ -88,9 +88,9 @@ struct Properties {
 /// One line of a chart: a row of points in the cells of its sheet, its look told apart by marker and dash.
 struct ChartLine {
     std::string name;
-    Area spans;              ///< cells along the horizontal axis
-    Area values;             ///< cells along the vertical axis
-    std::size_t look = 0;    ///< lines of different look differ in marker, dash and grey
+    Area spans;               ///< cells along the horizontal axis
+    Area values;              ///< cells along the vertical axis
+    std::size_t look = 0;     ///< lines of different look differ in marker, dash and grey
     bool is_envelope = false; ///< drawn thick, without markers
 };
 
