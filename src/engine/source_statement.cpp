@@ -19,7 +19,7 @@ public:
         members();
         load_categories();
         for (const Parameter& p : inputs_->catalogue.parameters) {
-            add("parameter", p.key, fmt::format("{} {}", p.value, p.unit == "-" ? "" : p.unit), p.provenance);
+            add("parameter", p.key, fmt::format("{}{}", p.value, p.unit == "-" ? "" : " " + p.unit), p.provenance);
         }
         service_factors();
         combinations();
@@ -31,7 +31,7 @@ private:
         if (!listed_.insert(kind + '\n' + item).second) return;
         std::string source = from.source;
         for (const Source& s : inputs_->catalogue.sources) {
-            if (s.key == from.source) source = s.edition.empty() ? s.title : s.title + ", " + s.edition;
+            if (s.key == from.source) source = s.edition.empty() || s.edition == "-" ? s.title : s.title + ", " + s.edition;
         }
         if (!from.note.empty()) source += " (" + from.note + ")";
         lines_.push_back(

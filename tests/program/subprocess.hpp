@@ -34,9 +34,11 @@ public:
         int ends[2];
         if (::pipe2(ends, O_CLOEXEC) != 0) throw std::runtime_error("no pipe");
         input_ = ends[1];
+        std::signal(SIGPIPE, SIG_IGN); // a program that stops reading is an answer, not the end of the test
         child_ = ::fork();
         if (child_ == 0) become(launch, ends[0]);
         ::close(ends[0]);
+        if (child_ < 0) throw std::runtime_error("no process"); // and never a signal to process -1, which is all
     }
     Subprocess(const Subprocess&) = delete;
     Subprocess& operator=(const Subprocess&) = delete;
@@ -77,6 +79,7 @@ private:
     }
 
     [[noreturn]] void become(const Launch& launch, int input) const {
+        std::signal(SIGPIPE, SIG_DFL);
         ::dup2(input, STDIN_FILENO);
         ::dup2(out_, STDOUT_FILENO);
         ::dup2(err_, STDERR_FILENO);
