@@ -31,7 +31,8 @@ private:
         if (!listed_.insert(kind + '\n' + item).second) return;
         std::string source = from.source;
         for (const Source& s : inputs_->catalogue.sources) {
-            if (s.key == from.source) source = s.edition.empty() || s.edition == "-" ? s.title : s.title + ", " + s.edition;
+            if (s.key == from.source)
+                source = s.edition.empty() || s.edition == "-" ? s.title : s.title + ", " + s.edition;
         }
         if (!from.note.empty()) source += " (" + from.note + ")";
         lines_.push_back(
