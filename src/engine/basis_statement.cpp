@@ -300,6 +300,7 @@ std::vector<BasisLine> basis_lines(const Inputs& inputs) {
 }
 
 std::vector<std::string> cautions(const Inputs& inputs) {
+    // NOLINTBEGIN(bugprone-suspicious-missing-comma): sentences longer than a line
     std::vector<std::string> words{
         "For competent persons only: a licensed practitioner decides whether a table applies to a building and answers "
         "for its use.",
@@ -311,6 +312,7 @@ std::vector<std::string> cautions(const Inputs& inputs) {
         "Strength, stiffness and parameter values marked as recalled must be confirmed against the standard before "
         "the tables are relied on.",
     };
+    // NOLINTEND(bugprone-suspicious-missing-comma)
     if (inputs.brief.support.arrangement == Arrangement::cantilever) {
         words.emplace_back("Cantilevers: rotation of the back span, hold-down and the bearing of the root are the "
                            "reader's to check.");

@@ -110,7 +110,7 @@ public:
     template <class N> using Inputs = typename Family::template Inputs<N>;
     template <class N> using Section = typename Family::template Section<N>;
 
-    FamilyRules(Kinds kinds, const Inputs<double>& inputs, LimitPlans plans)
+    FamilyRules(Kinds kinds, const Inputs<double>& inputs, LimitPlans&& plans)
         : kinds_(std::move(kinds)), inputs_(inputs), section_(Family::section(kinds_, inputs_)) {
         plans_ = std::move(plans);
     }

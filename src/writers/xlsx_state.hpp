@@ -24,6 +24,9 @@ struct BookState {
     std::vector<lxw_format*> formats;
     WriteResult problem;
 
+    BookState() = default;
+    BookState(const BookState&) = delete;
+    BookState& operator=(const BookState&) = delete;
     ~BookState() {
         if (workbook != nullptr) lxw_workbook_free(workbook);
     }

@@ -34,6 +34,7 @@ template <class N> struct TimberInputs {
 };
 
 /// Symbol, unit and meaning of every field, in order: visit(field, symbol, unit, meaning).
+// NOLINTNEXTLINE(readability-function-size): one line per field, nothing else
 template <class Inputs, class Visit> void timber_fields(Inputs& x, Visit&& visit) {
     visit(x.b, "b", "mm", "breadth of one ply");
     visit(x.h, "h", "mm", "depth");
