@@ -1,58 +1,39 @@
 // SPDX-License-Identifier: MIT
 #include "rolled_statement.hpp"
 
-#include "spanledger/member.hpp"
 #include "steel_limit_lines.hpp"
 
 #include <fmt/format.h>
 
-#include <algorithm>
 #include <array>
-#include <variant>
 
 namespace spanledger {
 namespace {
 
 constexpr const char* heading = "Rolled steel joists";
 
-struct Words {
-    const char* item;
-    const char* value;
-    const char* clause;
-    const char* origin;
-};
-
 constexpr std::array rules{
-    Words{"Standards", "EN 1993-1-1:2005, EN 1993-1-5:2006; grades of EN 10025-2, sections of EN 10365:2017", "",
-          "standard"},
-    Words{"Yield strength", "that of the thickest part of the section", "EN 10025-2 Table 7", "standard"},
-    Words{"Section properties", "from the dimensions, root fillets included", "", "geometry"},
-    Words{"Section classes", "plastic resistance in classes 1 and 2, elastic in class 3; class 4 is not covered",
-          "EN 1993-1-1 5.5, Table 5.2", "standard"},
-    Words{
+    FixedLine{"Standards", "EN 1993-1-1:2005, EN 1993-1-5:2006; grades of EN 10025-2, sections of EN 10365:2017", "",
+              "standard"},
+    FixedLine{"Yield strength", "that of the thickest part of the section", "EN 10025-2 Table 7", "standard"},
+    FixedLine{"Section properties", "from the dimensions, root fillets included", "", "geometry"},
+    FixedLine{"Section classes", "plastic resistance in classes 1 and 2, elastic in class 3; class 4 is not covered",
+              "EN 1993-1-1 5.5, Table 5.2", "standard"},
+    FixedLine{
         "Bending with shear",
         "at every section with V > V_Rd/2; the concentrated load stands where it is worst for the section; V_Rd is the "
         "smaller resistance where the web may buckle in shear",
         "EN 1993-1-1 6.2.8, (6.30)", "standard"},
-    Words{"Deflection of steel", "no creep; camber reduces the instantaneous deflection only", "EN 1990 A1.4.3",
-          "standard"},
-    Words{"Shear deformation", "where it is counted, of the web alone: 1/(G h_w t_w)", "", "assumption"},
-    Words{"Self-weight", "from the area with root fillets", "", "assumption"},
-    Words{"Channels", "the deck and its fixings keep the load from twisting the joist", "", "assumption"},
-    Words{"Web under a concentrated load", "not checked between the supports: the deck must spread the load", "",
-          "exclusion"},
-    Words{"Not covered", "class 4 sections; channels and cantilevers whose compression flange is free", "",
-          "exclusion"},
+    FixedLine{"Deflection of steel", "no creep; camber reduces the instantaneous deflection only", "EN 1990 A1.4.3",
+              "standard"},
+    FixedLine{"Shear deformation", "where it is counted, of the web alone: 1/(G h_w t_w)", "", "assumption"},
+    FixedLine{"Self-weight", "from the area with root fillets", "", "assumption"},
+    FixedLine{"Channels", "the deck and its fixings keep the load from twisting the joist", "", "assumption"},
+    FixedLine{"Web under a concentrated load", "not checked between the supports: the deck must spread the load", "",
+              "exclusion"},
+    FixedLine{"Not covered", "class 4 sections; channels and cantilevers whose compression flange is free", "",
+              "exclusion"},
 };
-
-bool has_rolled_joists(const Inputs& inputs) {
-    Diagnostics ignored; // the brief was read without errors
-    const auto& entries = inputs.brief.members;
-    return std::any_of(entries.begin(), entries.end(), [&](const MembersEntry& entry) {
-        const std::vector<Member> members = members_of(entry, inputs.catalogue, ignored);
-        return !members.empty() && std::holds_alternative<RolledMember>(members.front());
-    });
-}
 
 BasisLine web_line(const Support& support) {
     if (support.web_at_support == WebAtSupport::stiffened_or_cleated) {
@@ -97,8 +78,9 @@ void add_lateral_lines(const Inputs& inputs, std::vector<BasisLine>& lines) {
 
 std::vector<BasisLine> rolled_lines(const Inputs& inputs) {
     std::vector<BasisLine> lines;
-    if (!has_rolled_joists(inputs)) return lines;
-    for (const Words& words : rules) lines.push_back({heading, words.item, words.value, words.clause, words.origin});
+    if (!has_members<RolledMember>(inputs)) return lines;
+    for (const FixedLine& words : rules)
+        lines.push_back({heading, words.item, words.value, words.clause, words.origin});
     add_lateral_lines(inputs, lines);
     lines.push_back(web_line(inputs.brief.support));
     for (BasisLine& line : steel_limit_lines(inputs, heading)) lines.push_back(std::move(line));
